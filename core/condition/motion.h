@@ -1,0 +1,27 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+#include <cstddef>
+#include <vector>
+
+#include "core/base/remark.h"
+
+namespace dampwright {
+
+/// A recording on an even clock, corrected for what the rig does to it. Signs as in core/trace.
+/// Sample i is at startTime + i/rate.
+struct Motion {
+  double rate = 0;                   ///< Hz
+  double startTime = 0;              ///< s, on the clock of the file
+  std::vector<double> displacement;  ///< m, as the rig counts it (mid-positions belong to blocks)
+  std::vector<double> velocity;      ///< m/s, derivative of the displacement
+  std::vector<double> force;         ///< N, delay and moving mass taken out
+  std::vector<double> temperature;   ///< °C, empty where not recorded
+  std::vector<char>
+      doubtful;  ///< 1 where a sample is clipped or missing: never read, never repaired
+  std::vector<Remark> remarks;
+
+  std::size_t size() const { return displacement.size(); }
+  double timeOf(std::size_t sample) const { return startTime + static_cast<double>(sample) / rate; }
+};
+
+}  // namespace dampwright

@@ -1,0 +1,40 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+#include <cstddef>
+#include <optional>
+#include <vector>
+
+#include "core/base/direction.h"
+
+namespace dampwright {
+
+/// What one block says in one direction. Forces are in the direction that resists the motion (they
+/// may be negative).
+struct Reading {
+  double peakVelocity = 0;  ///< m/s, magnitude
+  double displacement = 0;  ///< m, where the peak velocity stands, zero at mid-stroke of the block
+  double force = 0;         ///< N at the peak velocity of the averaged loop
+  double forceU = 0;        ///< N, type A standard uncertainty from cycle to cycle
+  double forceDof = 0;      ///< degrees of freedom of forceU
+  std::optional<double>
+      dampingForce;          ///< N, gas taken off; nothing while the gas is not determined
+  double largestForce = 0;   ///< N, largest ordinate of the direction
+  double largestForceU = 0;  ///< N, type A
+  double energy = 0;         ///< J absorbed in this half of the cycle
+};
+
+/// A point of the force-velocity curve: a reading with the block that it came from.
+struct CurvePoint {
+  std::size_t block = 0;  ///< index into the measurement's blocks
+  double stroke = 0;      ///< m
+  Reading reading;
+};
+
+/// Force against velocity in one direction, by rising velocity. Points of different stroke stand
+/// beside each other and are never joined.
+struct Curve {
+  Direction direction = Direction::Compression;
+  std::vector<CurvePoint> points;
+};
+
+}  // namespace dampwright

@@ -1,0 +1,58 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+#include <cstdint>
+#include <functional>
+#include <optional>
+#include <string>
+#include <string_view>
+#include <vector>
+
+#include "core/base/progress.h"
+#include "core/base/result.h"
+#include "core/rig/rig_profile.h"
+#include "core/trace/trace.h"
+
+namespace dampwright {
+
+/// Answers that the technician or the command line gives; each settles one open point and beats all
+/// evidence.
+struct ReadOptions {
+  std::optional<std::string> encoding, delimiter, decimal;
+  std::optional<std::int64_t> headerRow;  ///< line from 1
+  std::optional<std::string> time, displacement, force, velocity,
+      temperature;  ///< column name or number from 1
+  std::optional<std::string> timeUnit, displacementUnit, forceUnit, velocityUnit, temperatureUnit;
+  std::optional<double> sampleRate;  ///< Hz
+  std::optional<Direction> displacementPositive, forcePositive;
+  std::optional<ZeroState> zeroState;
+};
+
+/// A question that the file does not answer by itself.
+struct OpenPoint {
+  std::string point;  ///< decimal | force | displacement | unit | sample-rate | direction
+  std::vector<std::string> candidates;  ///< what it could be
+  std::string option;                   ///< the option of the batch command that settles it
+};
+
+/// How a file was understood, and the recording when nothing that stops is open.
+struct RunReading {
+  Source source;
+  std::vector<Remark> remarks;
+  std::vector<OpenPoint> open;
+  std::optional<Trace> trace;  ///< nothing while an open point stops the reading
+};
+
+/// Finds the profile of the rig that writes files of this signature; nothing where it is new.
+using FindProfile = std::function<std::optional<RigProfile>(std::string_view signature)>;
+
+/// Bytes of a run file to a recording: encoding, dialect, preamble, header, units, roles, signs.
+/// `name` is the file's name without its folder. Errors (the file holds no run): file-empty,
+/// file-is-picture, file-is-binary, no-table, one-column, open-points, column-not-found … with
+/// place and what was found.
+Result<RunReading> readRun(std::string_view bytes,
+                           std::string_view name,
+                           const ReadOptions& options,
+                           const FindProfile& findProfile,
+                           const Progress& progress);
+
+}  // namespace dampwright
