@@ -18,6 +18,10 @@ struct Reading {
   double forceDof = 0;      ///< degrees of freedom of forceU
   std::optional<double>
       dampingForce;          ///< N, gas taken off; nothing while the gas is not determined
+  double forceTotalU = 0;    ///< N, combined standard uncertainty of force, see core/uncertainty
+  double forceTotalDof = 0;  ///< effective degrees of freedom of forceTotalU
+  double dampingForceTotalU = 0;  ///< N, combined standard uncertainty of dampingForce
+  double dampingForceTotalDof = 0;
   double largestForce = 0;   ///< N, largest ordinate of the direction
   double largestForceU = 0;  ///< N, type A
   double energy = 0;         ///< J absorbed in this half of the cycle

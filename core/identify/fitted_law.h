@@ -3,12 +3,15 @@
 #include <string>
 #include <vector>
 
+#include "core/base/quantity.h"
+
 namespace dampwright {
 
 struct FittedParameter {
   std::string name;  ///< as in formats of the handbook, with its unit: low_n_s_per_m
   double value = 0;  ///< SI
   double u = 0;      ///< standard error, SI
+  Quantity quantity = Quantity::Damping;
 };
 
 /// One damping law fitted to one direction's points (damping force less dry friction).

@@ -11,7 +11,7 @@
 #include "core/cycles/block.h"
 #include "core/identify/fitted_law.h"
 #include "core/identify/gas.h"
-#include "core/rig/rig_profile.h"
+#include "core/rig/rig_accuracy.h"
 #include "core/trace/trace.h"
 #include "core/uncertainty/budget.h"
 
@@ -49,14 +49,6 @@ struct MeasuredBlock {
   const Reading& reading(Direction direction) const {
     return direction == Direction::Compression ? compression : rebound;
   }
-};
-
-/// What the budget needs to know of the rig when it is judged, copied from the profile.
-struct RigAccuracy {
-  LoadCell loadCell;
-  std::optional<double> displacementAccuracy;  ///< m
-  std::optional<double> clockAccuracyPercent;
-  std::optional<double> remountPercent;
 };
 
 /// Everything the bench says about one damper at one setting. It knows no limits and no coverage
