@@ -1,5 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
+#include <cmath>
 #include <cstddef>
 #include <optional>
 #include <vector>
@@ -9,7 +10,7 @@
 namespace dampwright {
 
 /// What one block says in one direction. Forces are in the direction that resists the motion (they
-/// may be negative).
+/// may be negative). Where clipped or missing samples hide the figure, it is NaN.
 struct Reading {
   double peakVelocity = 0;  ///< m/s, magnitude
   double displacement = 0;  ///< m, where the peak velocity stands, zero at mid-stroke of the block
@@ -25,6 +26,8 @@ struct Reading {
   double largestForce = 0;   ///< N, largest ordinate of the direction
   double largestForceU = 0;  ///< N, type A
   double energy = 0;         ///< J absorbed in this half of the cycle
+
+  bool isRead() const { return !std::isnan(force); }
 };
 
 /// A point of the force-velocity curve: a reading with the block that it came from.

@@ -25,11 +25,13 @@ struct Cycle {
 struct Loop {
   std::vector<double> displacement;  ///< m, zero at the block's mid-stroke
   std::vector<double> velocity;      ///< m/s
-  std::vector<double> force;         ///< N
+  std::vector<double> force;  ///< N; NaN at a phase that no used cycle has a sound sample for
   std::vector<double>
       forceSpread;  ///< N, standard deviation of single cycles about the mean; empty for one cycle
-  double period = 0;  ///< s
-  int cycles = 0;     ///< how many were averaged
+  double period = 0;   ///< s
+  double top = 0.5;    ///< [1] phase of the upper turning point
+  int cycles = 0;      ///< how many were averaged
+  double samples = 0;  ///< recorded samples in one cycle, of which the grid was made
 
   std::size_t size() const { return displacement.size(); }
 };
@@ -46,9 +48,9 @@ struct Block {
   double holdForce = 0;       ///< N, mean force of a hold
   double holdForceU = 0;      ///< N, its standard uncertainty from scatter
   std::optional<double> temperature;  ///< °C, mean over the used cycles
-  Loop loop;
-  std::vector<Loop>
-      singles;  ///< each used cycle on the same grid (cycles = 1), for spread and type A
+  Loop loop;                  ///< empty (size 0) for a hold and where every cycle is struck out
+  std::vector<Loop> singles;  ///< each used cycle on the same grid (cycles = 1), for spread and
+                              ///< type A; its velocity is the mean loop's, scaled to its own period
   std::vector<Remark> remarks;
 
   int cyclesUsed() const {

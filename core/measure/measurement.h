@@ -9,6 +9,7 @@
 #include "core/base/remark.h"
 #include "core/curves/curve.h"
 #include "core/cycles/block.h"
+#include "core/cycles/time_span.h"
 #include "core/identify/fitted_law.h"
 #include "core/identify/gas.h"
 #include "core/rig/rig_accuracy.h"
@@ -19,11 +20,6 @@ namespace dampwright {
 
 /// Raised whenever an algorithm changes any figure.
 inline constexpr int measurementMethod = 1;
-
-struct TimeSpan {
-  double start = 0, end = 0;  ///< s, clock of the file
-  bool operator==(const TimeSpan&) const = default;
-};
 
 /// One run file as it went into a measurement.
 struct MeasuredRun {
