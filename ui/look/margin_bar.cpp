@@ -53,7 +53,9 @@ void paintFigure(QPainter& painter,
                  const Palette& palette) {
   const double y = box.center().y();
   const double radius = 0.26 * box.height();
-  const double x = box.left() + *scale.at * box.width();
+  const double x = std::clamp(box.left() + *scale.at * box.width(),
+                              box.left() + 1.25 * radius,
+                              box.right() - 1.25 * radius);
   painter.setPen(QPen(palette.ink, 0.11 * box.height(), Qt::SolidLine, Qt::FlatCap));
   painter.drawLine(QPointF(box.left() + scale.from * box.width(), y),
                    QPointF(box.left() + scale.to * box.width(), y));
@@ -79,7 +81,7 @@ MarginScale marginScale(const CheckVerdict& check) {
   if (!check.measured) return scale;
   const double share = line.of(*check.measured);
   const double half = std::abs(line.slope) * check.expandedUncertainty;
-  scale.at = std::clamp(share, 0.03, 0.97);
+  scale.at = std::clamp(share, 0.0, 1.0);
   scale.beyond = share < 0 || share > 1;
   scale.from = std::clamp(share - half, 0.0, 1.0);
   scale.to = std::clamp(share + half, 0.0, 1.0);

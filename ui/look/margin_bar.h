@@ -12,9 +12,9 @@ namespace dampwright {
 /// Where a figure stands between its limits, as shares of a bar's width; pure geometry.
 struct MarginScale {
   double allowedFrom = 0, allowedTo = 1;  ///< the allowed stretch; one-sided limits reach the end
-  std::optional<double> at;  ///< the figure, clamped to 0.03 … 0.97; nothing: not tested
-  double from = 0, to = 0;   ///< figure ± U, clamped to 0 … 1
-  bool beyond = false;       ///< the figure lies outside the bar and was clamped
+  std::optional<double> at;               ///< the figure, clamped to 0 … 1; nothing: not tested
+  double from = 0, to = 0;                ///< figure ± U, clamped to 0 … 1
+  bool beyond = false;                    ///< the figure lies outside the bar and was clamped
 };
 
 /// Two limits fill the middle half of the bar. One limit stands at three quarters (a largest value)

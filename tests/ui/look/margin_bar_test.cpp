@@ -46,8 +46,8 @@ TEST(MarginBars, ASmallestValueStandsAtOneQuarter) {
 
 TEST(MarginBars, AFigureFarOutIsClampedAndSaysSo) {
   EXPECT_TRUE(marginScale(check(9000, 5, 870, 1120)).beyond);
-  EXPECT_NEAR(*marginScale(check(9000, 5, 870, 1120)).at, 0.97, 1e-12);
-  EXPECT_NEAR(*marginScale(check(-900, 5, 870, 1120)).at, 0.03, 1e-12);
+  EXPECT_NEAR(*marginScale(check(9000, 5, 870, 1120)).at, 1.0, 1e-12);
+  EXPECT_NEAR(*marginScale(check(-900, 5, 870, 1120)).at, 0.0, 1e-12);
 }
 
 TEST(MarginBars, DegenerateLimitsStayOnTheBar) {
