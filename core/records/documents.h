@@ -41,4 +41,25 @@ std::string writeLimits(const Limits& limits);
 Result<Job> readJob(std::string_view bytes, std::string_view file);
 std::string writeJob(const Job& job);
 
+/// How a run file was understood: a reading without its trace. In addition to formats: "file",
+/// "sha256", "bytes"; "why" is a code with "why_text" beside it; a remark's "values" (SI, with
+/// their unit), so that its sentence can be made again in another language. A metadata key that
+/// comes twice is written with " (2)" behind it.
+Result<RunReading> readColumns(std::string_view bytes, std::string_view file);
+std::string writeColumns(const RunReading& reading);
+
+/// Everything but the loops. A stored measurement can be judged again: in addition to formats it
+/// holds the rig's accuracies ("rig"), each figure's part of its uncertainty that comes from the
+/// cycles or from the fit ("…_cycles_u", "…_fit_u"), their pooled percentage, each point's block,
+/// the cycles' times, the gas column, whether the direction is settled, and all that a "columns"
+/// document says of each file. Also measurement-out-of-joint where an index points nowhere.
+Result<Measurement> readMeasurement(std::string_view bytes, std::string_view file);
+std::string writeMeasurement(const Measurement& measurement);
+
+/// In addition to formats: all keys of the check's kind, "standard_uncertainty", "dof", the
+/// reason's code and values, "force_basis", and "waiting": what must be confirmed before checks by
+/// direction are judged. Figures stand in the SI unit that "unit" names.
+Result<Verdict> readVerdict(std::string_view bytes, std::string_view file);
+std::string writeVerdict(const Verdict& verdict);
+
 }  // namespace dampwright

@@ -12,6 +12,7 @@ namespace {
 
 using OrderedJson = nlohmann::ordered_json;
 
+const std::string wholeRule = "0, 1, 2, …";
 constexpr double largestWhole = 9007199254740992.0;  // 2^53: every whole number up to it is exact
 
 // The first bytes of a text that an error may print, cut between characters.
@@ -169,7 +170,7 @@ void Fields::wholeNumber(std::string_view key, std::optional<double>& value, dou
   if (whole && *number <= std::min(most, largestWhole)) {
     value = *number;
   } else {
-    valueError("document-out-of-range", key, *node, {{"rule", std::string("0, 1, 2, …")}});
+    valueError("document-out-of-range", key, *node, {{"rule", wholeRule}});
   }
 }
 
@@ -273,6 +274,19 @@ void Fields::numbers(std::string_view key, std::vector<double>& values) {
     const auto* number = std::get_if<double>(&node.value);
     if (!number && !node.isNull()) return valueError("document-not-a-number", key, node, {});
     values.push_back(number ? unit.toSi(*number) : unit.whenNull);
+  }
+}
+
+void Fields::counts(std::string_view key, std::vector<std::int64_t>& values) {
+  std::vector<double> numbers(values.begin(), values.end());
+  this->numbers(key, numbers);
+  if (!reading()) return;
+  values.clear();
+  for (const double number : numbers) {
+    if (!(number >= 0 && number <= largestWhole && number == std::floor(number)))
+      return valueError(
+          "document-out-of-range", key, node_->object()->find(key)->second, {{"rule", wholeRule}});
+    values.push_back(static_cast<std::int64_t>(number));
   }
 }
 

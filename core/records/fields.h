@@ -73,11 +73,13 @@ class Fields {
     wholeNumber(key, whole, double(std::numeric_limits<Whole>::max()));
     if (whole) value = static_cast<Whole>(*whole);
   }
-  void count(std::string_view key, std::optional<int>& value) {
-    std::optional<double> whole = value ? std::optional<double>(*value) : std::nullopt;
-    wholeNumber(key, whole, std::numeric_limits<int>::max());
-    value = whole ? std::optional<int>(static_cast<int>(*whole)) : std::nullopt;
+  template <class Whole>
+  void count(std::string_view key, std::optional<Whole>& value) {
+    std::optional<double> whole = value ? std::optional<double>(double(*value)) : std::nullopt;
+    wholeNumber(key, whole, double(std::numeric_limits<Whole>::max()));
+    value = whole ? std::optional<Whole>(static_cast<Whole>(*whole)) : std::nullopt;
   }
+  void counts(std::string_view key, std::vector<std::int64_t>& values);
   void texts(std::string_view key, std::vector<std::string>& values);
   void numbers(std::string_view key, std::vector<double>& values);
 

@@ -14,23 +14,23 @@ namespace {
 constexpr double nan = std::numeric_limits<double>::quiet_NaN();
 constexpr double infinity = std::numeric_limits<double>::infinity();
 
-constexpr KeyUnit plain{"", 1, 1, nan};
+constexpr KeyUnit plain{"", Quantity::None, 1, 1, nan};
 
 // A longer ending stands before a shorter one that it ends with.
 constexpr std::array<KeyUnit, 12> units{{
-    {"dof", 1, 1, infinity},
-    {"aicc", 1, 1, infinity},
-    {"_n_per_mm", 1000, 1, nan},
-    {"_n_s_per_m", 1, 1, nan},
-    {"_mm_s", 1, 1000, nan},
-    {"_mm", 1, 1000, nan},
-    {"_ms", 1, 1000, nan},
-    {"_n", 1, 1, nan},
-    {"_deg", pi, 180, nan},
-    {"_bar", 1e5, 1, nan},
+    {"dof", Quantity::None, 1, 1, infinity},
+    {"aicc", Quantity::None, 1, 1, infinity},
+    {"_n_per_mm", Quantity::Stiffness, 1000, 1, nan},
+    {"_n_s_per_m", Quantity::Damping, 1, 1, nan},
+    {"_mm_s", Quantity::Velocity, 1, 1000, nan},
+    {"_mm", Quantity::Length, 1, 1000, nan},
+    {"_ms", Quantity::Time, 1, 1000, nan},
+    {"_n", Quantity::Force, 1, 1, nan},
+    {"_deg", Quantity::Angle, pi, 180, nan},
+    {"_bar", Quantity::None, 1e5, 1, nan},
     // Written as they are kept: the table names them so that nobody adds a factor elsewhere.
-    {"_s", 1, 1, nan},
-    {"_c", 1, 1, nan},
+    {"_s", Quantity::Time, 1, 1, nan},
+    {"_c", Quantity::Temperature, 1, 1, nan},
 }};
 
 double fifteenDigits(double value) {

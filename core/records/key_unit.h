@@ -2,12 +2,15 @@
 #pragma once
 #include <string_view>
 
+#include "core/base/quantity.h"
+
 namespace dampwright {
 
 /// A number's unit as the end of its key says it ("stroke_mm", "force_n_u", "equivalent_damping_
 /// n_s_per_m"). The one place where a document's unit becomes SI and back.
 struct KeyUnit {
   std::string_view suffix;
+  Quantity quantity = Quantity::None;
   double siNumerator = 1;  ///< SI value = number · siNumerator / siDenominator
   double siDenominator = 1;
   double whenNull = 0;  ///< what `null` stands for: NaN (not determined), +inf for degrees of
