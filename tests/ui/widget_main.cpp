@@ -1,0 +1,22 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+// Tests of widgets run without a screen and without touching anybody's settings.
+#include <gmock/gmock.h>
+
+#include <QApplication>
+#include <QLocale>
+#include <QStandardPaths>
+
+#include "ui/look/palette.h"
+#include "ui/look/type.h"
+
+int main(int count, char** arguments) {
+  qputenv("QT_QPA_PLATFORM", "offscreen");
+  QStandardPaths::setTestModeEnabled(true);
+  QLocale::setDefault(QLocale::c());
+  QApplication application(count, arguments);
+  QApplication::setStyle(QStringLiteral("Fusion"));
+  QApplication::setFont(dampwright::screenFont(dampwright::TextSize::Text));
+  QApplication::setPalette(dampwright::asQPalette(dampwright::lightPalette()));
+  testing::InitGoogleMock(&count, arguments);
+  return RUN_ALL_TESTS();
+}
