@@ -8,6 +8,7 @@
 #include <vector>
 
 #include "core/base/expects.h"
+#include "core/fit/scaled_qr.h"
 
 namespace dampwright {
 namespace {
@@ -84,39 +85,20 @@ struct Outlook {
   double cosine = 0;        ///< ‖Qᵀr‖/‖r‖
   double relativeStep = 0;  ///< largest |δb|/|b|
   bool fullRank = false;
-  MatrixXd inverse;  ///< (JᵀJ)⁻¹ of the free parameters
 };
 
 Outlook outlook(const Point& point, double rankTolerance) {
+  const ScaledQr qr(point.jacobian(Eigen::all, point.free));
   Outlook out;
-  const Index count = static_cast<Index>(point.free.size());
-  if (point.residuals.size() < count) return out;
-  if (count == 0) {
-    out.fullRank = true;
-    return out;
-  }
-  MatrixXd jacobian = point.jacobian(Eigen::all, point.free);
-  VectorXd norms = jacobian.colwise().norm();
-  if (norms.minCoeff() <= 0) return out;
-  jacobian = jacobian * norms.cwiseInverse().asDiagonal();
-  const Eigen::ColPivHouseholderQR<MatrixXd> qr(jacobian);
-  const MatrixXd r = qr.matrixR().topRows(count).template triangularView<Eigen::Upper>();
-  const VectorXd diagonal = r.diagonal().cwiseAbs();
-  out.fullRank = diagonal.minCoeff() > rankTolerance * diagonal.maxCoeff();
+  out.fullRank = qr.fullRank(rankTolerance);
   if (!out.fullRank) return out;
-  const VectorXd projected = (qr.householderQ().adjoint() * point.residuals).head(count);
-  out.cosine = point.rss > 0 ? projected.norm() / std::sqrt(point.rss) : 0;
-  const auto upper = r.triangularView<Eigen::Upper>();
-  const VectorXd step =
-      (qr.colsPermutation() * VectorXd(upper.solve(projected))).cwiseQuotient(norms);
+  const VectorXd projection = qr.project(point.residuals);
+  out.cosine = point.rss > 0 ? projection.norm() / std::sqrt(point.rss) : 0;
+  const VectorXd step = qr.solve(projection).cwiseAbs();
   const VectorXd at = point.parameters(point.free).cwiseAbs();
-  for (Index j = 0; j < count; ++j) {
-    if (step[j] != 0) out.relativeStep = std::max(out.relativeStep, std::abs(step[j]) / at[j]);
+  for (Index j = 0; j < step.size(); ++j) {
+    if (step[j] > 0) out.relativeStep = std::max(out.relativeStep, step[j] / at[j]);
   }
-  const MatrixXd half =
-      qr.colsPermutation() * MatrixXd(upper.solve(MatrixXd::Identity(count, count)));
-  const MatrixXd scaled = norms.cwiseInverse().asDiagonal() * half;
-  out.inverse = scaled * scaled.transpose();
   return out;
 }
 
@@ -145,7 +127,7 @@ FitStatus statusAt(const Point& point, const Outlook& out, double tolerance) {
   return held ? FitStatus::AtBound : FitStatus::Converged;
 }
 
-FitSummary summarize(const Point& point, const Outlook& out, FitStatus status, int iterations) {
+FitSummary summarize(const Point& point, FitStatus status, int iterations) {
   FitSummary summary;
   const Index count = point.parameters.size();
   summary.status = status;
@@ -158,7 +140,8 @@ FitSummary summarize(const Point& point, const Outlook& out, FitStatus status, i
   summary.standardErrors = VectorXd::Constant(count, nan);
   summary.covariance = MatrixXd::Constant(count, count, nan);
   if (!summary.usable()) return summary;
-  summary.covariance(point.free, point.free) = summary.residualVariance * out.inverse;
+  summary.covariance(point.free, point.free) =
+      summary.residualVariance * ScaledQr(point.jacobian(Eigen::all, point.free)).inverseOfSquare();
   summary.standardErrors = summary.covariance.diagonal().cwiseSqrt();
   return summary;
 }
@@ -196,6 +179,12 @@ std::string_view codeOf(FitStatus status) {
   return {};
 }
 
+std::optional<MatrixXd> unscaledCovariance(const MatrixXd& jacobian, double rankTolerance) {
+  const ScaledQr qr(jacobian);
+  if (!qr.fullRank(rankTolerance)) return std::nullopt;
+  return qr.inverseOfSquare();
+}
+
 FitSummary fitLeastSquares(const LeastSquaresProblem& problem,
                            const VectorXd& start,
                            const FitOptions& options) {
@@ -203,7 +192,7 @@ FitSummary fitLeastSquares(const LeastSquaresProblem& problem,
   Point point = evaluate(problem, clamp(problem, start));
   if (std::isfinite(point.rss)) differentiate(problem, point);
   if (!std::isfinite(point.rss) || !point.jacobian.allFinite()) {
-    return summarize(point, {}, FitStatus::NotFinite, 0);
+    return summarize(point, FitStatus::NotFinite, 0);
   }
   VectorXd scale = VectorXd::Constant(start.size(), std::numeric_limits<double>::min());
   Damping damping;
@@ -212,7 +201,7 @@ FitSummary fitLeastSquares(const LeastSquaresProblem& problem,
   while (iterations < options.maxIterations && damping.value < largestDamping) {
     const FitStatus status = statusAt(point, out, options.tolerance);
     if (status == FitStatus::Converged || status == FitStatus::AtBound) {
-      return summarize(point, out, status, iterations);
+      return summarize(point, status, iterations);
     }
     ++iterations;
     scale = scale.cwiseMax(point.jacobian.colwise().norm().transpose());
@@ -237,7 +226,7 @@ FitSummary fitLeastSquares(const LeastSquaresProblem& problem,
   }
   const double tolerance =
       damping.value < largestDamping ? options.tolerance : options.stalledTolerance;
-  return summarize(point, out, statusAt(point, out, tolerance), iterations);
+  return summarize(point, statusAt(point, out, tolerance), iterations);
 }
 
 }  // namespace dampwright

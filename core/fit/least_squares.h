@@ -2,6 +2,7 @@
 #pragma once
 #include <Eigen/Core>
 #include <functional>
+#include <optional>
 #include <string_view>
 
 namespace dampwright {
@@ -61,5 +62,10 @@ struct FitSummary {
 FitSummary fitLeastSquares(const LeastSquaresProblem& problem,
                            const Eigen::VectorXd& start,
                            const FitOptions& options = {});
+
+/// (JᵀJ)⁻¹ where a fit's errors are scaled by something else than its own residuals; nothing where
+/// the columns of J are not independent (FitStatus::RankDeficient).
+std::optional<Eigen::MatrixXd> unscaledCovariance(const Eigen::MatrixXd& jacobian,
+                                                  double rankTolerance = 1e-11);
 
 }  // namespace dampwright
