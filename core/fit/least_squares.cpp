@@ -61,7 +61,8 @@ std::vector<Index> freeParameters(const LeastSquaresProblem& problem, const Poin
   for (Index j = 0; j < gradient.size(); ++j) {
     const bool low = problem.lower.size() > 0 && point.parameters[j] <= problem.lower[j];
     const bool high = problem.upper.size() > 0 && point.parameters[j] >= problem.upper[j];
-    if (!(low && gradient[j] > 0) && !(high && gradient[j] < 0)) free.push_back(j);
+    const bool fixed = low && high;
+    if (!fixed && !(low && gradient[j] > 0) && !(high && gradient[j] < 0)) free.push_back(j);
   }
   return free;
 }

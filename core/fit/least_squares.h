@@ -12,7 +12,7 @@ struct LeastSquaresProblem {
   std::function<Eigen::VectorXd(const Eigen::VectorXd&)> residuals;  ///< r(b) = model − data
   std::function<Eigen::MatrixXd(const Eigen::VectorXd&)>
       jacobian;           ///< ∂r_i/∂b_j; empty: central differences, good to about 1e-9
-  Eigen::VectorXd lower;  ///< empty: none; -inf where one parameter has none
+  Eigen::VectorXd lower;  ///< empty: none; -inf where one parameter has none; equal to upper: fixed
   Eigen::VectorXd upper;  ///< empty: none; +inf where one parameter has none
 };
 
