@@ -30,7 +30,8 @@ ConditionOptions conditionOptions(const RigProfile& rig);
 ///
 /// Remarks (those that the trace already carries are not repeated): uneven-clock, gap,
 /// missing-values, spikes-removed, clipped-force, velocity-disagrees.
-/// Errors: trace-too-short (values: rows, needed).
+/// A class too high for the sample rate (over rate/4.2) filters nothing.
+/// Errors: trace-too-short (values: rows, needed), gap-too-long (values: duration).
 Result<Motion> condition(const Trace& trace, const ConditionOptions& options = {});
 
 }  // namespace dampwright

@@ -1,0 +1,161 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/signal/turning_points.h"
+
+#include <algorithm>
+#include <cmath>
+
+#include "core/base/expects.h"
+#include "core/signal/robust.h"
+
+namespace dampwright {
+namespace {
+
+constexpr double nearLevel = 0.1, farLevel = 0.2;  // of the half stroke
+
+// Extremes between reversals larger than the hysteresis, the ones at the edges included.
+std::vector<TurningPoint> zigzag(std::span<const double> x, double hysteresis) {
+  std::vector<TurningPoint> turns;
+  std::size_t low = 0, high = 0;
+  int direction = 0;  // of the motion: +1 rising, −1 falling, 0 not known yet
+  for (std::size_t i = 1; i < x.size(); ++i) {
+    if (x[i] > x[high]) high = i;
+    if (x[i] < x[low]) low = i;
+    if (direction <= 0 && x[i] - x[low] > hysteresis) {
+      turns.push_back({low, 0, x[low], false, turns.empty()});
+      direction = 1;
+      high = i;
+    } else if (direction >= 0 && x[high] - x[i] > hysteresis) {
+      turns.push_back({high, 0, x[high], true, turns.empty()});
+      direction = -1;
+      low = i;
+    }
+  }
+  if (direction > 0) turns.push_back({high, 0, x[high], true, true});
+  if (direction < 0) turns.push_back({low, 0, x[low], false, true});
+  return turns;
+}
+
+// Takes out the half strokes that are small between two larger ones, with both their ends.
+std::vector<TurningPoint> withoutSmall(const std::vector<TurningPoint>& turns, double share) {
+  std::vector<TurningPoint> kept;
+  for (const TurningPoint& turn : turns) {
+    kept.push_back(turn);
+    while (kept.size() >= 4) {
+      const auto* last = &kept.back();
+      const double before = std::abs(last[-2].value - last[-3].value);
+      const double middle = std::abs(last[-1].value - last[-2].value);
+      const double after = std::abs(last[0].value - last[-1].value);
+      if (middle >= share * std::min(before, after)) break;
+      kept.erase(kept.end() - 3, kept.end() - 1);
+    }
+  }
+  return kept;
+}
+
+// Coefficients of the parabola x(t) by least squares over [centre − m, centre + m], t from centre.
+struct Parabola {
+  double c0 = 0, c1 = 0, c2 = 0;
+};
+
+Parabola parabolaAround(std::span<const double> x, std::ptrdiff_t centre, std::ptrdiff_t m) {
+  double y0 = 0, y1 = 0, y2 = 0;
+  for (std::ptrdiff_t k = -m; k <= m; ++k) {
+    const double value = x[static_cast<std::size_t>(centre + k)], t = static_cast<double>(k);
+    y0 += value;
+    y1 += value * t;
+    y2 += value * t * t;
+  }
+  const double n = 2.0 * static_cast<double>(m) + 1, w = static_cast<double>(m);
+  const double s2 = n * w * (w + 1) / 3, s4 = s2 * (3 * w * w + 3 * w - 1) / 5;
+  const double det = n * s4 - s2 * s2;
+  return {(s4 * y0 - s2 * y2) / det, y1 / s2, (n * y2 - s2 * y0) / det};
+}
+
+// One side of a turning point: from it to its neighbour. Depth counts from the turning point.
+struct Side {
+  std::span<const double> x;
+  std::ptrdiff_t from, to;
+  double top, sign;  // depth = sign·(top − x)
+
+  double depth(std::ptrdiff_t i) const { return sign * (top - x[static_cast<std::size_t>(i)]); }
+
+  std::ptrdiff_t firstBeyond(double wanted) const {
+    const std::ptrdiff_t step = to >= from ? 1 : -1;
+    std::ptrdiff_t i = from;
+    while (i != to && depth(i) < wanted) i += step;
+    return i;
+  }
+
+  // Where the depth passes `wanted`, between samples: from a parabola over the samples about there.
+  double crossing(double wanted) const {
+    const std::ptrdiff_t at = firstBeyond(wanted);
+    std::ptrdiff_t m = std::max<std::ptrdiff_t>(2, std::abs(at - firstBeyond(0.6 * wanted)));
+    m = std::min({m, at, static_cast<std::ptrdiff_t>(x.size()) - 1 - at});
+    if (m < 1) return static_cast<double>(at);
+    const double level = top - sign * wanted;
+    const Parabola fit = parabolaAround(x, at, m);
+    const double curvature = m > 1 ? fit.c2 : 0;
+    double t = 0;
+    for (int i = 0; i < 4; ++i) {
+      const double slope = fit.c1 + 2 * curvature * t;
+      if (slope == 0) break;
+      t -= (fit.c0 - level + t * (fit.c1 + curvature * t)) / slope;
+      t = std::clamp(t, -static_cast<double>(m), static_cast<double>(m));
+    }
+    return static_cast<double>(at) + t;
+  }
+};
+
+Side sideOf(std::span<const double> x, const TurningPoint& turn, const TurningPoint& neighbour) {
+  return {x,
+          static_cast<std::ptrdiff_t>(turn.sample),
+          static_cast<std::ptrdiff_t>(neighbour.sample),
+          turn.value,
+          turn.upper ? 1.0 : -1.0};
+}
+
+double placeBetween(const Side& left, const Side& right, double halfStroke) {
+  const double near =
+      (left.crossing(nearLevel * halfStroke) + right.crossing(nearLevel * halfStroke)) / 2;
+  const double far =
+      (left.crossing(farLevel * halfStroke) + right.crossing(farLevel * halfStroke)) / 2;
+  return near + (near - far) * nearLevel / (farLevel - nearLevel);
+}
+
+double placeAtEdge(const Side& side, double halfStroke) {
+  const double near = side.crossing(nearLevel * halfStroke);
+  const double far = side.crossing(farLevel * halfStroke);
+  const double nearAngle = std::acos(1 - 2 * nearLevel), farAngle = std::acos(1 - 2 * farLevel);
+  return near + (near - far) * nearAngle / (farAngle - nearAngle);
+}
+
+}  // namespace
+
+std::vector<TurningPoint> turningPoints(std::span<const double> x, const TurningOptions& options) {
+  expects(options.hysteresis >= 0 && options.share >= 0);
+  std::vector<TurningPoint> turns = withoutSmall(zigzag(x, options.hysteresis), options.share);
+  if (turns.size() < 2) return {};
+  std::vector<double> places;
+  for (std::size_t i = 0; i < turns.size(); ++i) {
+    const TurningPoint& turn = turns[i];
+    const TurningPoint& before = turns[i == 0 ? 1 : i - 1];
+    const TurningPoint& after = turns[i + 1 == turns.size() ? i - 1 : i + 1];
+    const double halfStroke =
+        std::min(std::abs(turn.value - before.value), std::abs(turn.value - after.value));
+    const bool inner = i > 0 && i + 1 < turns.size();
+    const double place =
+        inner ? placeBetween(sideOf(x, turn, before), sideOf(x, turn, after), halfStroke)
+              : placeAtEdge(sideOf(x, turn, before), halfStroke);
+    places.push_back(std::clamp(place, 0.0, static_cast<double>(x.size() - 1)));
+  }
+  for (std::size_t i = 0; i < turns.size(); ++i) turns[i].place = places[i];
+  return turns;
+}
+
+double safeHysteresis(std::span<const double> signal) {
+  if (signal.empty()) return 0;
+  const auto [low, high] = std::minmax_element(signal.begin(), signal.end());
+  return std::max(12 * noiseLevel(signal), 0.004 * (*high - *low));
+}
+
+}  // namespace dampwright
