@@ -72,7 +72,7 @@ std::optional<double> BlockMaker::temperatureOf(const std::vector<RawCycle>& cyc
 
 Remark countRemark(const char* code, int leftOut, int wanted) {
   Remark remark{code, Severity::Note, {}, leftOut, 0};
-  remark.values = {{"left-out", static_cast<double>(leftOut), Quantity::Count},
+  remark.values = {{"left_out", static_cast<double>(leftOut), Quantity::Count},
                    {"wanted", static_cast<double>(wanted), Quantity::Count}};
   return remark;
 }
@@ -137,8 +137,8 @@ std::vector<Block> speedBlocks(const Motion& motion,
 
 Error noFullCycle(const Motion& motion, const StrokeSummary& found) {
   return {"no-full-cycle",
-          {{"turning-points", static_cast<double>(found.turningPoints), Quantity::Count},
-           {"longest-stroke", found.longestStroke, Quantity::Length},
+          {{"turning_points", static_cast<double>(found.turningPoints), Quantity::Count},
+           {"longest_stroke", found.longestStroke, Quantity::Length},
            {"duration", static_cast<double>(motion.size()) / motion.rate, Quantity::Time}},
           {}};
 }

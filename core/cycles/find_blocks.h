@@ -31,7 +31,7 @@ struct CycleOptions {
 /// ±25 mm. Conditioning: the first `firstBlockConditioning` cycles of the first block, then
 /// `laterBlockConditioning`, never more than a third of a block, rounded down.
 /// Remarks of a block: few-conditioning-cycles, not-warm, too-few-cycles, cycle-struck-out.
-/// Errors: no-full-cycle (values: turning-points, longest-stroke, duration).
+/// Errors: no-full-cycle (values: turning_points, longest_stroke, duration).
 Result<std::vector<Block>> findBlocks(const Motion& motion, const CycleOptions& options = {});
 
 }  // namespace dampwright

@@ -28,6 +28,8 @@ constexpr Sentence rows[] = {
     {"friction-not-determined",
      "The friction is not determined by this test.",
      "Add a slow block of 5 mm/s or less to the test."},
+    {"no-points", "The curve of this direction could not be read.", "See the remarks on the run."},
+    {"stroke-not-tested", "No block of the asked stroke was tested.", "Test at that stroke."},
     {"speed-not-tested",
      "{velocity} lies outside the speeds that were tested.",
      "Test this speed too."},
