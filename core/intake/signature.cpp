@@ -1,16 +1,26 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/intake/signature.h"
 
-#include "core/intake/letters.h"
-
 namespace dampwright {
 namespace {
 
-std::string asciiLowered(std::string text) {
-  for (char& letter : text) {
-    if (letter >= 'A' && letter <= 'Z') letter = static_cast<char>(letter - 'A' + 'a');
+bool isBlank(char letter) { return letter == ' ' || letter == '\t'; }
+
+char lower(char letter) {
+  return letter >= 'A' && letter <= 'Z' ? static_cast<char>(letter - 'A' + 'a') : letter;
+}
+
+std::string tidyName(std::string_view name) {
+  std::string tidy;
+  for (const char letter : name) {
+    if (!isBlank(letter)) {
+      tidy += lower(letter);
+    } else if (!tidy.empty() && tidy.back() != ' ') {
+      tidy += ' ';
+    }
   }
-  return text;
+  if (!tidy.empty() && tidy.back() == ' ') tidy.pop_back();
+  return tidy;
 }
 
 }  // namespace
@@ -19,7 +29,7 @@ std::string signatureOf(std::span<const SignatureColumn> columns) {
   std::string signature;
   for (const SignatureColumn& column : columns) {
     if (&column != columns.data()) signature += '|';
-    signature += asciiLowered(withSingleBlanks(column.name));
+    signature += tidyName(column.name);
     if (!column.unit.empty()) signature.append(" [").append(column.unit).append("]");
   }
   return signature;

@@ -39,6 +39,7 @@ void describe(Fields& io, CheckVerdict& verdict) {
   io.number("margin", verdict.margin);
   io.word("verdict", verdict.verdict, words::verdicts);
   describe(io, verdict.reason);
+  describeRemarks(io, verdict.remarks);
   io.list("budget", verdict.budget, [](Fields& one, BudgetLine& line) { describe(one, line); });
 }
 

@@ -36,16 +36,23 @@ struct CheckField {
 
 /// What a check measures: a figure with its budget, or the reason why there is none.
 struct Figure {
-  std::optional<double> value;     ///< SI
-  std::vector<BudgetLine> budget;  ///< of value; combine() gives its standard uncertainty
-  Reason reason;                   ///< code empty where there is a value
+  std::optional<double> value = {};        ///< SI
+  std::vector<BudgetLine> budget = {};     ///< of value; combine() gives its standard uncertainty
+  std::optional<double> temperature = {};  ///< °C, of the damper while it was read
+  std::optional<BlockKind> waveform = {};  ///< of the block it was read from, where that matters
+  std::vector<Remark> remarks = {};
+  Reason reason = {};  ///< code empty where there is a value
 };
+
+/// Whether a figure means anything while it is only assumed which sign is compression.
+enum class NeedsDirection { Yes, No };
 
 /// A kind of check: its name in limit sheets, the keys it has, and how its figure is found.
 /// A new kind is one file with its row, and that row in checkKinds().
 struct CheckKind {
   std::string_view name;
   Quantity quantity;
+  NeedsDirection direction;
   std::span<const CheckField> fields;
   Figure (*evaluate)(const Measurement& measurement, const Limits& limits, const Check& check);
 };

@@ -23,15 +23,18 @@ Figure friction(const Measurement& measurement, const Limits&, const Check& chec
   const std::optional<double>& value = dry ? found.dry : found.halfDifference;
   if (!value) {
     const bool known = dry && !found.reason.empty();
-    return {{}, {}, {known ? found.reason : "friction-not-determined", {}}};
+    return {.reason = {known ? found.reason : "friction-not-determined", {}}};
   }
   const auto kind = dry ? FrictionKind::Dry : FrictionKind::HalfDifference;
-  return {value, frictionBudget(found, kind, measurement.rig), {}};
+  return {.value = value,
+          .budget = frictionBudget(found, kind, measurement.rig),
+          .temperature = measurement.gas.temperature};
 }
 
 }  // namespace
 
 /// Two figures under one name, never mixed: the half difference (default) and the dry friction.
-const CheckKind frictionCheckKind{"friction", Quantity::Force, fields, friction};
+const CheckKind frictionCheckKind{
+    "friction", Quantity::Force, NeedsDirection::No, fields, friction};
 
 }  // namespace dampwright

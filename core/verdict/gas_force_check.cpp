@@ -17,13 +17,17 @@ constexpr std::array<CheckField, 5> fields{{
 
 Figure gasForce(const Measurement& measurement, const Limits&, const Check&) {
   const Gas& gas = measurement.gas;
-  if (!gas.force) return {{}, {}, {gas.reason.empty() ? "gas-not-determined" : gas.reason, {}}};
-  return {gas.force, gasBudget(gas, measurement.rig), {}};
+  if (!gas.force) return {.reason = {gas.reason.empty() ? "gas-not-determined" : gas.reason, {}}};
+  return {.value = gas.force,
+          .budget = gasBudget(gas, measurement.rig),
+          .temperature = gas.temperature};
 }
 
 }  // namespace
 
-/// Gas force at mid-stroke, positive where it pushes the rod out.
-const CheckKind gasForceCheckKind{"gas force", Quantity::Force, fields, gasForce};
+/// Gas force at mid-stroke, positive where it pushes the rod out: its sign is only known with the
+/// direction.
+const CheckKind gasForceCheckKind{
+    "gas force", Quantity::Force, NeedsDirection::Yes, fields, gasForce};
 
 }  // namespace dampwright

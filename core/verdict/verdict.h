@@ -6,6 +6,7 @@
 
 #include "core/base/named_value.h"
 #include "core/base/quantity.h"
+#include "core/base/remark.h"
 #include "core/uncertainty/budget.h"
 #include "core/verdict/limits.h"
 
@@ -32,6 +33,7 @@ struct CheckVerdict {
   std::optional<double> min, max;  ///< SI, the limits after target and tolerance were worked out
   std::optional<double> margin;  ///< SI, min(y − min, max − y), positive inside, U not taken off
   Reason reason;
+  std::vector<Remark> remarks;  ///< how the figure was read, where that is worth knowing
   std::vector<BudgetLine> budget;
 };
 
