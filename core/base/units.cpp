@@ -38,12 +38,13 @@ constexpr Unit volt{"V", Quantity::Voltage, 1, 0};
 constexpr Unit hertz{"Hz", Quantity::Frequency, 1, 0};
 
 // Spellings in lower case. "m" is metre and never minute; "k" is kelvin; "kp" is the old kilopond.
-constexpr std::array<Spelling, 63> spellings{{
+constexpr std::array<Spelling, 65> spellings{{
     {"s", second},
     {"sec", second},
     {"secs", second},
     {"second", second},
     {"seconds", second},
+    {"sek", second},
     {"ms", millisecond},
     {"msec", millisecond},
     {"millisecond", millisecond},
@@ -101,6 +102,7 @@ constexpr std::array<Spelling, 63> spellings{{
     {"k", kelvin},
     {"v", volt},
     {"volt", volt},
+    {"volts", volt},
     {"hz", hertz},
 }};
 

@@ -1,26 +1,16 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/intake/signature.h"
 
+#include "core/intake/letters.h"
+
 namespace dampwright {
 namespace {
 
-bool isBlank(char letter) { return letter == ' ' || letter == '\t'; }
-
-char lower(char letter) {
-  return letter >= 'A' && letter <= 'Z' ? static_cast<char>(letter - 'A' + 'a') : letter;
-}
-
-std::string tidyName(std::string_view name) {
-  std::string tidy;
-  for (const char letter : name) {
-    if (!isBlank(letter)) {
-      tidy += lower(letter);
-    } else if (!tidy.empty() && tidy.back() != ' ') {
-      tidy += ' ';
-    }
+std::string asciiLowered(std::string text) {
+  for (char& letter : text) {
+    if (letter >= 'A' && letter <= 'Z') letter = static_cast<char>(letter - 'A' + 'a');
   }
-  if (!tidy.empty() && tidy.back() == ' ') tidy.pop_back();
-  return tidy;
+  return text;
 }
 
 }  // namespace
@@ -29,7 +19,7 @@ std::string signatureOf(std::span<const SignatureColumn> columns) {
   std::string signature;
   for (const SignatureColumn& column : columns) {
     if (&column != columns.data()) signature += '|';
-    signature += tidyName(column.name);
+    signature += asciiLowered(withSingleBlanks(column.name));
     if (!column.unit.empty()) signature.append(" [").append(column.unit).append("]");
   }
   return signature;

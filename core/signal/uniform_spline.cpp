@@ -15,9 +15,12 @@ const double pole = std::sqrt(3.0) - 2;
 std::vector<double> coefficientsOf(std::span<const double> signal) {
   const std::size_t n = signal.size();
   std::vector<double> c(n + 3);
-  const auto reach = std::min<std::size_t>(n, 30);  // pole^30 is under 1e-17
+  const std::size_t around = 2 * n - 2;  // samples until the mirrored signal comes back
   double power = 1, start = 0;
-  for (std::size_t k = 0; k < reach; ++k, power *= pole) start += 6 * signal[k] * power;
+  for (std::size_t k = 0; k < 30; ++k, power *= pole) {  // pole^30 is under 1e-17
+    const std::size_t there = k % around;
+    start += 6 * power * signal[there < n ? there : around - there];
+  }
   c[1] = start;
   for (std::size_t k = 1; k < n; ++k) c[k + 1] = 6 * signal[k] + pole * c[k];
   c[n] = pole / (pole * pole - 1) * (c[n] + pole * c[n - 1]);

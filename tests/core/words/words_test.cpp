@@ -30,9 +30,10 @@ TEST(Words, ANumberThatIsNoneIsSaidSo) {
 
 TEST(Words, AnErrorIsOneLineWithCodePlaceTextAndHint) {
   const Error error{"file-empty", {}, {"a.csv", 0, 0}};
-  EXPECT_EQ(englishLine(error),
-            "file-empty: a.csv: a.csv is empty. Record the run again, or pick the file that holds "
-            "it.");
+  EXPECT_EQ(
+      englishLine(error),
+      "file-empty: a.csv: The file is empty. Record the run again, or pick the file that holds "
+      "it.");
 }
 
 TEST(Words, ThePlaceNamesRowAndColumnWhereTheyAreKnown) {

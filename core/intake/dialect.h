@@ -1,0 +1,41 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+#include <cstddef>
+#include <optional>
+#include <vector>
+
+#include "core/base/result.h"
+#include "core/intake/number_form.h"
+#include "core/intake/split_row.h"
+#include "core/intake/text_lines.h"
+
+namespace dampwright {
+
+/// How the rows of a table are written.
+struct Dialect {
+  char delimiter = ',';
+  std::size_t columns = 0;        ///< fields of a row, empty ones at its end included
+  std::vector<char> numeric;      ///< per column: 1 where most rows hold a number
+  std::vector<char> filled;       ///< per column: 1 where some row holds something
+  std::vector<NumberForm> forms;  ///< per column
+  bool decimalProven = false;     ///< some column settles the decimal mark of the file
+  char decimal = '.';  ///< of the file: of those columns that do not settle it themselves
+  std::vector<std::size_t> open;  ///< columns of nothing but "1,234": only the user can tell
+  std::vector<std::size_t> settledByOthers;  ///< columns of "1,234" that the other columns settled
+};
+
+struct DialectOptions {
+  std::optional<char> delimiter, decimal, thousands;
+};
+
+/// Judges lines by what splits them into the most numbers and the least text. A comma never stands
+/// for both delimiter and decimal mark unless the number is quoted; digits are grouped in thousands
+/// only where a cell or another column proves it.
+/// Errors: no-table (no two lines hold numbers), one-column, too-many-columns.
+Result<Dialect> findDialect(const SampleLines& sample, const DialectOptions& options);
+
+/// The row has as many fields as the dialect's rows, and a number or nothing in each column of
+/// numbers, with numbers in at least half of them.
+bool isDataRow(const std::vector<Cell>& cells, const Dialect& dialect);
+
+}  // namespace dampwright
