@@ -119,7 +119,7 @@ class ClockMaker {
     const double jitter = even > 0 ? std::sqrt(squares / static_cast<double>(even)) : 0;
     if (jitter <= evenWithin) return;
     clock_.remarks.push_back(
-        Remark{"uneven-clock", Severity::Note, {{"jitter", 100 * jitter, Quantity::Percent}}});
+        Remark{"uneven-clock", Severity::Warning, {{"jitter", 100 * jitter, Quantity::Percent}}});
   }
 
   std::vector<double> time_;

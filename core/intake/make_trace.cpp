@@ -24,6 +24,11 @@ void keepRows(std::vector<double>& values, const std::vector<std::size_t>& kept)
   values.resize(kept.size());
 }
 
+// core/condition says these again, of the samples that are used.
+bool saidByCondition(const Remark& remark) {
+  return remark.code == "missing-values" || remark.code == "gap" || remark.code == "uneven-clock";
+}
+
 class TraceMaker {
  public:
   TraceMaker(ReadTable table, const ReadOptions& options, const std::optional<RigProfile>& rig)
@@ -54,6 +59,7 @@ class TraceMaker {
       trace_.zeroState = options_.zeroState.value_or(rig_ ? rig_->zeroState : ZeroState::Unknown);
       trace_.source = table_.source;
       trace_.remarks = reading_.remarks;
+      std::erase_if(trace_.remarks, saidByCondition);
       reading_.trace = std::move(trace_);
     }
     reading_.source = std::move(table_.source);

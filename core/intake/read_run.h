@@ -49,7 +49,8 @@ using FindProfile = std::function<std::optional<RigProfile>(std::string_view sig
 /// Bytes of a run file to a recording: encoding, dialect, preamble, header, units, roles, clock,
 /// signs. `name` is the file's name without its folder. Nothing is dropped without a remark, and
 /// nothing guessed: what evidence does not settle is an open point, and all but `direction` leave
-/// the reading without a trace. Remarks of a trace are those of its reading. Errors (the file holds
+/// the reading without a trace. Remarks of a trace are those of its reading, but for
+/// missing-values, gap and uneven-clock, which core/condition says itself. Errors (the file holds
 /// no run, or an option can't be): file-empty, file-is-picture, file-is-document, file-is-archive,
 /// file-is-binary, no-table, one-column, too-few-rows, too-many-columns, line-too-long,
 /// header-row-not-found, column-not-found, option-not-understood, stopped; with the file and where

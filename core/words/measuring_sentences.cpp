@@ -20,7 +20,10 @@ constexpr Sentence rows[] = {
     {"uneven-clock",
      "The rows are not evenly spaced in time, so the recording was brought to an even clock.",
      "Check the rig's clock."},
-    {"gap", "Rows are missing in the middle, first before row {first_row}.", ""},
+    {"gap",
+     "Rows are missing in the middle, first before row {first_row}; the longest gap lasts "
+     "{longest}.",
+     ""},
     {"missing-values",
      "{count} values of displacement or force are missing, first in row {first_row}; cycles are "
      "read without them.",

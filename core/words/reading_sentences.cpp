@@ -69,9 +69,6 @@ constexpr Sentence rows[] = {
      "Numbers of {column} were read with marks for thousands, because other columns show which "
      "mark is the decimal one.",
      "If that is wrong, give --decimal."},
-    {"missing-values",
-     "{count} cells hold no number, the first in row {first_row}; what they belong to is not used.",
-     ""},
     {"unreadable-cells",
      "{count} cells hold something else than a number (\"{example}\"), the first in row "
      "{first_row}; what they belong to is not used.",
@@ -108,11 +105,6 @@ constexpr Sentence rows[] = {
     {"repeated-stamps",
      "{count} times repeat the one before, the first in row {first_row}; they were spread evenly.",
      ""},
-    {"gap",
-     "The recording has {count} gaps, the first before row {first_row}; the longest lasts "
-     "{longest}.",
-     ""},
-    {"uneven-clock", "Samples are not evenly spaced: their steps vary by {jitter} rms.", ""},
     {"force-sign-reversed",
      "The force sign looks reversed: with the sign that was given, the damper would make energy "
      "instead of taking it up.",
