@@ -12,6 +12,8 @@ namespace {
 
 constexpr double infinite = std::numeric_limits<double>::infinity();
 
+constexpr double midStroke = 0.1;  // [1] of the stroke: farther away a standstill is a rig at rest
+
 using Blocks = std::span<const BlockToIdentify>;
 
 bool isHold(const BlockToIdentify& item) { return item.block->kind == BlockKind::Hold; }
@@ -46,6 +48,10 @@ const BlockToIdentify* nearestHold(Blocks blocks, double place) {
     if (found == nullptr || distance < std::abs(found->block->mid - place)) found = &item;
   }
   return found;
+}
+
+bool isAtMidStroke(const Block& hold, const Block& slow) {
+  return std::abs(hold.mid - slow.mid) <= midStroke * slow.stroke;
 }
 
 double meanMid(Blocks blocks) {
@@ -154,6 +160,9 @@ GasAndFriction identifyGasAndFriction(Blocks blocks, const IdentifyOptions& opti
   }
   const double place = slow != nullptr ? slow->block->mid : meanMid(blocks);
   const BlockToIdentify* hold = nearestHold(blocks, place);
+  if (slow != nullptr && hold != nullptr && !isAtMidStroke(*hold->block, *slow->block)) {
+    hold = nullptr;
+  }
   const BlockToIdentify* least = slowest(blocks, [](const BlockToIdentify&) { return true; });
   if (hold != nullptr && !hidden) {
     const double difference = least != nullptr ? std::abs(halfDifference(*least, gas)) : 0;

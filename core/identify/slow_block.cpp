@@ -19,8 +19,10 @@ constexpr double infinite = std::numeric_limits<double>::infinity();
 constexpr double smallestChange = 0.005, largestChange = 0.25;  // v_f over the peak speed
 constexpr std::array<double, 3> changeStarts{0.02, 0.06, 0.2};  // the same; the best fit is taken
 constexpr double directFrom = 0.15, directTo = 0.35;            // |v| over the peak speed
-constexpr double largestReach = 0.9;                            // |x/L|
-constexpr double significant = 2;  // standard errors, for 1/L to be kept
+constexpr double nearReversal =
+    0.02;  // |v| over the peak speed: nearer, a mean mixes both directions
+constexpr double largestReach = 0.9;  // |x/L|
+constexpr double significant = 2;     // standard errors, for 1/L to be kept
 
 // Order of the parameters.
 enum Parameter : Index { Force, Shape, Dry, Change, CompressionSlope, ReboundSlope, Count };
@@ -34,11 +36,13 @@ Samples deceleratingHalves(const Loop& loop) {
   const auto& v = loop.velocity;
   const auto fastestIn = std::max_element(v.begin(), v.end()) - v.begin();
   const auto fastestOut = std::min_element(v.begin(), v.end()) - v.begin();
+  if (loop.size() == 0) return {};
+  const double least = nearReversal * *std::max_element(v.begin(), v.end());
   std::vector<std::size_t> chosen;
   for (std::size_t i = 0; i < loop.size(); ++i) {
     const auto at = static_cast<std::ptrdiff_t>(i);
-    const bool in = v[i] > 0 && at >= fastestIn && at < fastestOut;
-    const bool out = v[i] < 0 && at >= fastestOut;
+    const bool in = v[i] > least && at >= fastestIn && at < fastestOut;
+    const bool out = v[i] < -least && at >= fastestOut;
     if ((in || out) && std::isfinite(loop.force[i])) chosen.push_back(i);
   }
   const auto count = static_cast<Index>(chosen.size());

@@ -32,10 +32,11 @@ struct SlowBlockFit {
   bool usable() const { return status == FitStatus::Converged || status == FitStatus::AtBound; }
 };
 
-/// Fits the decelerating half strokes (from peak speed to the turning point; lost motion lies
-/// behind them) of a slow block by F = gas(x) + Fc·tanh(v/v_f) + c_dir·v with v_f and one c for
-/// each direction free. v_f is kept between 0.5 % and 25 % of the block's peak speed.
-/// Accuracy: gas 0.5 N, dry friction 1 N at 2 N rms noise, ±25 mm, 5 mm/s, 2 kHz, one cycle.
+/// Fits the decelerating half strokes (from peak speed down to 2 % of it; lost motion lies behind
+/// them, and nearer to the reversal an average mixes both directions) of a slow block by F = gas(x)
+/// + Fc·tanh(v/v_f) + c_dir·v with v_f and one c for each direction free. v_f is kept between 0.5 %
+/// and 25 % of the block's peak speed. Accuracy: gas 0.5 N, dry friction 1 N at 2 N rms noise, ±25
+/// mm, 5 mm/s, 2 kHz, one cycle.
 SlowBlockFit fitSlowBlock(const Block& block, GasShape shape, double exponent);
 
 }  // namespace dampwright

@@ -40,7 +40,7 @@ TEST(IdentifyGasAndFriction, ASlowSineGivesBoth) {
 TEST(IdentifyGasAndFriction, AHoldIsPreferredForTheGas) {
   test::MadeRun run;
   run.add(model, slow());
-  run.addHold(0.03, model(0.03, 0) + 3, 0.1);  // the hold stands 3 N off, held by friction
+  run.addHold(0.014, model(0.014, 0) + 3, 0.1);  // the hold stands 3 N off, held by friction
   const auto [gas, friction] = identifyGasAndFriction(run.items());
   ASSERT_TRUE(gas.force);
   EXPECT_EQ(gas.method, "hold");
@@ -49,6 +49,15 @@ TEST(IdentifyGasAndFriction, AHoldIsPreferredForTheGas) {
   EXPECT_NEAR(gas.forceU, 24 / std::sqrt(3.0), 1);  // ±Fc as limits
   EXPECT_TRUE(std::isinf(gas.forceDof));
   EXPECT_NEAR(*friction.dry, 24, 1e-5);
+}
+
+TEST(IdentifyGasAndFriction, ARigAtRestAtTheEndOfItsStrokeIsNoHoldBesideASlowBlock) {
+  test::MadeRun run;
+  run.add(model, slow());
+  run.addHold(-0.015, model(-0.015, 0) - 24, 0.1);
+  const Gas gas = identifyGasAndFriction(run.items()).gas;
+  EXPECT_EQ(gas.method, "slow block");
+  EXPECT_NEAR(*gas.force, 160, 1e-5);
 }
 
 TEST(IdentifyGasAndFriction, AHoldAloneGivesGasButNoFriction) {
