@@ -4,6 +4,8 @@
 #include <algorithm>
 #include <cmath>
 
+#include "core/signal/robust.h"
+
 namespace dampwright {
 namespace {
 
@@ -14,17 +16,6 @@ struct Run {
   std::ptrdiff_t from = 0, to = 0;  // [from, to)
   std::ptrdiff_t size() const { return to - from; }
 };
-
-// The step of the sensor: the first percentile of the differences that are not 0.
-double sensorStep(std::span<const double> x) {
-  std::vector<double> steps;
-  for (std::size_t i = 1; i < x.size(); i += 1 + x.size() / 50000)
-    if (x[i] != x[i - 1]) steps.push_back(std::abs(x[i] - x[i - 1]));
-  if (steps.empty()) return 0;
-  const auto low = steps.begin() + static_cast<std::ptrdiff_t>(steps.size() / 100);
-  std::nth_element(steps.begin(), low, steps.end());
-  return *low;
-}
 
 std::vector<Run> runsAt(std::span<const double> x, double level) {
   std::vector<Run> runs;
@@ -85,7 +76,7 @@ bool cutOff(std::span<const double> x, const Run& run, double sign, double quant
 std::vector<ClippedSide> findClipped(std::span<const double> x) {
   std::vector<ClippedSide> sides;
   if (x.empty()) return sides;
-  const double quantum = sensorStep(x);
+  const double quantum = smallestStep(x);
   const auto [least, most] = std::minmax_element(x.begin(), x.end());
   for (const double sign : {1.0, -1.0}) {
     const double level = sign > 0 ? *most : *least;

@@ -11,6 +11,7 @@ namespace {
 
 constexpr std::size_t longest = 3;       // samples of one spike
 constexpr std::size_t reach = 7;         // samples to each side that tell what is usual
+constexpr double sensorSteps = 3;        // a coarse sensor toggles by one, at times by two
 constexpr double smallestShare = 0.005;  // of the range
 
 // The range without the outermost 0.2 % at each end, from at most about 20,000 samples.
@@ -36,14 +37,27 @@ double standsOut(std::span<const double> x, const Spike& spike) {
   return std::max({*least - high, low - *most, 0.0});
 }
 
+// Robust spread of the samples about the spike, taken about their straight line.
 double usualSpread(std::span<const double> x, const Spike& spike) {
   const std::size_t from = spike.first > reach ? spike.first - reach : 0;
   const std::size_t to = std::min(x.size(), spike.first + spike.count + reach);
-  std::vector<double> around(x.begin() + static_cast<std::ptrdiff_t>(from),
-                             x.begin() + static_cast<std::ptrdiff_t>(spike.first));
-  around.insert(around.end(),
-                x.begin() + static_cast<std::ptrdiff_t>(spike.first + spike.count),
-                x.begin() + static_cast<std::ptrdiff_t>(to));
+  const auto inSpike = [&](std::size_t i) {
+    return i >= spike.first && i < spike.first + spike.count;
+  };
+  double n = 0, t1 = 0, t2 = 0, y1 = 0, ty = 0;
+  for (std::size_t i = from; i < to; ++i) {
+    if (inSpike(i)) continue;
+    const double t = static_cast<double>(i - from);
+    n += 1;
+    t1 += t;
+    t2 += t * t;
+    y1 += x[i];
+    ty += t * x[i];
+  }
+  const double slope = (ty - t1 * y1 / n) / (t2 - t1 * t1 / n);
+  std::vector<double> around;
+  for (std::size_t i = from; i < to; ++i)
+    if (!inSpike(i)) around.push_back(x[i] - slope * static_cast<double>(i - from));
   return robustSpread(around);
 }
 
@@ -52,7 +66,8 @@ double usualSpread(std::span<const double> x, const Spike& spike) {
 std::vector<Spike> findSpikes(std::span<const double> x, double threshold) {
   std::vector<Spike> spikes;
   if (x.size() < 2 * reach) return spikes;
-  const double floor = std::max(smallestShare * usualRange(x), threshold * noiseLevel(x));
+  const double floor = std::max(
+      {smallestShare * usualRange(x), threshold * noiseLevel(x), sensorSteps * smallestStep(x)});
   for (std::size_t i = 2; i + longest + 1 < x.size(); ++i) {
     if (!(std::abs(x[i] - x[i - 1]) > floor)) continue;
     for (std::size_t count = 1; count <= longest; ++count) {

@@ -13,10 +13,11 @@ struct Spike {
 };
 
 /// Isolated spikes of an even signal: one to three samples that all stand beyond the two samples on
-/// either side, by `threshold` robust standard deviations of the 14 samples about them (Hampel's
-/// identifier), as many noise levels, and half a percent of the signal's range. So neither a step
-/// (monotone), nor the corner of a triangle, nor a toggling last digit is one.
-/// Source: Hampel, J. Am. Stat. Assoc. 69 (1974) 383; the side conditions are our own.
+/// either side, by `threshold` robust standard deviations of the 14 samples about them (about their
+/// straight line), as many noise levels, three steps of the sensor, and half a percent of the
+/// signal's range. So neither a step (monotone), nor the corner of a triangle, nor a toggling last
+/// digit is one. Source: Hampel, J. Am. Stat. Assoc. 69 (1974) 383; the side conditions are our
+/// own.
 std::vector<Spike> findSpikes(std::span<const double> signal, double threshold);
 
 /// The signal with a straight line in place of each spike.

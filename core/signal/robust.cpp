@@ -39,4 +39,14 @@ double noiseLevel(std::span<const double> signal) {
   return normalPerMad * median(std::move(differences)) / std::sqrt(20.0);  // 1 + 9 + 9 + 1
 }
 
+double smallestStep(std::span<const double> signal) {
+  std::vector<double> steps;
+  for (std::size_t i = 1; i < signal.size(); i += 1 + signal.size() / 50000)
+    if (signal[i] != signal[i - 1]) steps.push_back(std::abs(signal[i] - signal[i - 1]));
+  if (steps.empty()) return 0;
+  const auto low = steps.begin() + static_cast<std::ptrdiff_t>(steps.size() / 100);
+  std::nth_element(steps.begin(), low, steps.end());
+  return *low;
+}
+
 }  // namespace dampwright

@@ -16,4 +16,8 @@ double robustSpread(std::span<const double> values);
 /// cycle adds about A·(2π/N)³/8 to it. 0 where most differences vanish, as in coarse steps.
 double noiseLevel(std::span<const double> signal);
 
+/// The step of a coarse sensor: first percentile of the differences between neighbours that are not
+/// 0 (of at most about 50,000); next to nothing where the digits are fine. 0 for a constant.
+double smallestStep(std::span<const double> signal);
+
 }  // namespace dampwright
