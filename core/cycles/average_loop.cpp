@@ -19,6 +19,27 @@ std::vector<std::uint32_t> countsBefore(const std::vector<char>& doubtful) {
   return counts;
 }
 
+// A straight line across each doubtful stretch, so that nothing of it leaks into the spline beside
+// it.
+std::vector<double> bridged(std::vector<double> values,
+                            const std::vector<char>& doubtful,
+                            int bits) {
+  const auto bad = [&](std::size_t i) { return (doubtful[i] & bits) != 0; };
+  for (std::size_t from = 0; from < values.size(); ++from) {
+    if (!bad(from)) continue;
+    std::size_t to = from;
+    while (to < values.size() && bad(to)) ++to;
+    if (from == 0 && to == values.size()) break;
+    const double before = from > 0 ? values[from - 1] : values[to];
+    const double after = to < values.size() ? values[to] : before;
+    const double length = static_cast<double>(to - from + 1);
+    for (std::size_t i = from; i < to; ++i)
+      values[i] = before + (after - before) * static_cast<double>(i - from + 1) / length;
+    from = to;
+  }
+  return values;
+}
+
 // Mean and standard deviation of the sound forces of all cycles at one grid point.
 struct Moments {
   double mean = nan, spread = nan;
@@ -62,8 +83,8 @@ Loop meanOf(const std::vector<Loop>& singles) {
 
 LoopAverager::LoopAverager(const Motion& motion)
     : rate_(motion.rate),
-      displacement_(motion.displacement),
-      force_(motion.force),
+      displacement_(bridged(motion.displacement, motion.doubtful, PlaceMissing)),
+      force_(bridged(motion.force, motion.doubtful, ForceClipped | ForceMissing | PlaceMissing)),
       doubtBefore_(countsBefore(motion.doubtful)) {}
 
 bool LoopAverager::sound(double from, double to) const {

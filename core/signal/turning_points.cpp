@@ -11,6 +11,7 @@ namespace dampwright {
 namespace {
 
 constexpr double nearLevel = 0.1, farLevel = 0.2;  // of the half stroke
+constexpr double edgeLevel = 0.0005;               // of the half stroke, still the edge itself
 
 // Extremes between reversals larger than the hysteresis, the ones at the edges included.
 std::vector<TurningPoint> zigzag(std::span<const double> x, double hysteresis) {
@@ -122,11 +123,31 @@ double placeBetween(const Side& left, const Side& right, double halfStroke) {
   return near + (near - far) * nearLevel / (farLevel - nearLevel);
 }
 
-double placeAtEdge(const Side& side, double halfStroke) {
+// Where the motion stood at the edge, and over which samples: the median of those beside the
+// extreme one, since the extreme itself is the largest of the noise.
+struct EdgeRest {
+  double value = 0, first = 0, last = 0;
+};
+
+EdgeRest restAtEdge(const Side& side, double halfStroke, double noise) {
+  const double reach = std::max(edgeLevel * halfStroke, 8 * noise);
+  const auto size = static_cast<std::ptrdiff_t>(side.x.size());
+  std::ptrdiff_t from = side.from, to = side.from;
+  while (from > 0 && side.depth(from - 1) <= reach) --from;
+  while (to + 1 < size && side.depth(to + 1) <= reach) ++to;
+  return {median({side.x.begin() + from, side.x.begin() + to + 1}),
+          static_cast<double>(from),
+          static_cast<double>(to)};
+}
+
+double placeAtEdge(Side side, double halfStroke, double noise) {
+  const EdgeRest rest = restAtEdge(side, halfStroke, noise);
+  side.top = rest.value;
   const double near = side.crossing(nearLevel * halfStroke);
   const double far = side.crossing(farLevel * halfStroke);
   const double nearAngle = std::acos(1 - 2 * nearLevel), farAngle = std::acos(1 - 2 * farLevel);
-  return near + (near - far) * nearAngle / (farAngle - nearAngle);
+  const double place = near + (near - far) * nearAngle / (farAngle - nearAngle);
+  return std::clamp(place, rest.first - 1, rest.last + 1);
 }
 
 }  // namespace
@@ -135,6 +156,7 @@ std::vector<TurningPoint> turningPoints(std::span<const double> x, const Turning
   expects(options.hysteresis >= 0 && options.share >= 0);
   std::vector<TurningPoint> turns = withoutSmall(zigzag(x, options.hysteresis), options.share);
   if (turns.size() < 2) return {};
+  const double noise = noiseLevel(x);
   std::vector<double> places;
   for (std::size_t i = 0; i < turns.size(); ++i) {
     const TurningPoint& turn = turns[i];
@@ -145,8 +167,8 @@ std::vector<TurningPoint> turningPoints(std::span<const double> x, const Turning
     const bool inner = i > 0 && i + 1 < turns.size();
     const double place =
         inner ? placeBetween(sideOf(x, turn, before), sideOf(x, turn, after), halfStroke)
-              : placeAtEdge(sideOf(x, turn, before), halfStroke);
-    places.push_back(std::clamp(place, 0.0, static_cast<double>(x.size() - 1)));
+              : placeAtEdge(sideOf(x, turn, before), halfStroke, noise);
+    places.push_back(place);
   }
   for (std::size_t i = 0; i < turns.size(); ++i) turns[i].place = places[i];
   return turns;
