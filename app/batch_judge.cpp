@@ -1,0 +1,72 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "app/batch_files.h"
+#include "app/batch_verbs.h"
+#include "core/base/sha256.h"
+#include "core/records/documents.h"
+#include "core/verdict/judge.h"
+
+namespace dampwright {
+namespace {
+
+/// A measurement and the checksum of its document.
+struct Stored {
+  Measurement measurement;
+  std::string sha256;
+};
+
+bool looksLikeDocument(std::string_view bytes) {
+  if (bytes.starts_with("\xEF\xBB\xBF")) bytes.remove_prefix(3);
+  const auto first = bytes.find_first_not_of(" \t\r\n");
+  return first != std::string_view::npos && bytes[first] == '{';
+}
+
+// The stored measurement where the only file is one; nothing where it is a run.
+Result<std::optional<Stored>> storedMeasurement(const BatchRequest& request) {
+  if (request.files.size() != 1 || request.files.front() == "-") return std::optional<Stored>();
+  const std::string& path = request.files.front();
+  const auto bytes = loadInput(path);
+  if (!bytes) return bytes.error();
+  if (!looksLikeDocument(bytes.value())) return std::optional<Stored>();
+  auto measurement = readMeasurement(bytes.value(), path);
+  if (!measurement) return measurement.error();
+  return std::optional<Stored>(Stored{std::move(measurement).value(), sha256Hex(bytes.value())});
+}
+
+Result<Stored> measurementOf(const BatchRequest& request) {
+  auto stored = storedMeasurement(request);
+  if (!stored) return stored.error();
+  if (stored.value()) return std::move(*stored.value());
+  auto measured = measureFiles(request);
+  if (!measured) return measured.error();
+  const std::string sha256 = sha256Hex(writeMeasurement(measured.value()));
+  return Stored{std::move(measured).value(), sha256};
+}
+
+int statusOf(VerdictWord word) {
+  switch (word) {
+    case VerdictWord::Pass:
+      return exit_status::done;
+    case VerdictWord::Fail:
+      return exit_status::fail;
+    case VerdictWord::TooCloseToCall:
+    case VerdictWord::NotTested:
+      break;
+  }
+  return exit_status::open;
+}
+
+}  // namespace
+
+Result<BatchAnswer> judgeVerb(const BatchRequest& request) {
+  const auto text = loadInput(request.limits);
+  if (!text) return text.error();
+  const auto limits = readLimits(text.value(), request.limits);
+  if (!limits) return limits.error();
+  const auto stored = measurementOf(request);
+  if (!stored) return stored.error();
+  Verdict verdict = judge(stored.value().measurement, limits.value());
+  verdict.measurementSha256 = stored.value().sha256;
+  return BatchAnswer{writeVerdict(verdict), statusOf(verdict.word)};
+}
+
+}  // namespace dampwright
