@@ -168,7 +168,7 @@ Json truthJson(const SampleTruth& truth, const SampleVehicle& vehicle) {
   if (damper.reboundClicks) json["rebound_clicks"] = *damper.reboundClicks;
   for (const SampleFile& file : truth.files) json["files"].push_back(file.name);
   json["gas_force_n"] = rounded(truth.gasN);
-  json["dry_friction_n"] = damper.damper.friction.dry;
+  json["dry_friction_n"] = truth.dryFrictionN;
   json["half_difference_n"] = rounded(truth.halfDifferenceN);
   json["lost_motion_mm"] = {{"compression", rounded(damper.damper.compressionGap * 1e3)},
                             {"rebound", rounded(damper.damper.reboundGap * 1e3)}};

@@ -114,7 +114,7 @@ std::string damperSection(const SampleTruth& truth) {
   std::string text = "### " + titleOf(truth) + "\n\n" + truth.damper.story + "\n\n";
   text += "Serial " + truth.damper.serial + ", " + truth.damper.rig.name + ". Gas " +
           fixedText(truth.gasN, 1) + " N at mid-stroke and " + fixedText(truth.startC, 0) +
-          " °C; dry friction " + fixedText(damper.friction.dry, 0) +
+          " °C; dry friction " + fixedText(truth.dryFrictionN, 0) +
           " N; half difference at 5 mm/s " + fixedText(truth.halfDifferenceN, 1) +
           " N; lost motion " + fixedText(damper.compressionGap * 1e3, 1) + " mm in compression, " +
           fixedText(damper.reboundGap * 1e3, 1) + " mm in rebound; " + fixedText(truth.startC, 1) +

@@ -32,6 +32,7 @@ SampleDamper atClicks(int clicks, const std::string& story) {
       .start = 23, .room = 22, .capacity = 900, .cooling = 1.2, .fadePercentPer10C = -1};
   one.plan = samplePlan(stroke, 0.2, {{0.05, 5}, {0.1, 6}, {0.3, 12}, {0.6, 16}});
   one.rig = bench4();
+  one.rig.channels.front().decimals = 3;
   one.instrument.rate = 1000;
   one.instrument.seed = 200 + static_cast<unsigned>(clicks);
   one.instrument.movingMass = one.rig.movingMassKg;
@@ -96,6 +97,7 @@ std::vector<SampleDamper> motorcycleDampers() {
   SampleDamper& middle = settings[2];
   middle.layout = FileLayout::FilePerSpeed;
   middle.instrument.rate = 2000;
+  middle.rig = bench4();  // half milliseconds need the fourth decimal
   // every file's first block conditions the damper again: enough cycles for it in each
   for (auto& step : middle.plan.steps) {
     auto& block = std::get<bench::BlockPlan>(step);

@@ -39,7 +39,7 @@ SampleRig bench3() {
   SampleRig rig;
   rig.name = "bench 3";
   rig.channels = {{Channel::Time, "Time", "s", 1, 3},
-                  {Channel::Displacement, "Crosshead", "mm", 1e-3, 3},
+                  {Channel::Displacement, "Crosshead", "mm", 1e-3, 2},
                   {Channel::Force, "Cell", "kN", 1e3, 4}};
   rig.nameForm = NameForm::UnitInRow;
   rig.style.delimiter = '\t';

@@ -35,6 +35,9 @@ void readBlocks(SampleTruth& truth) {
   }
   expects(truth.blocks.front().plan.speed <= slowest);
   truth.gasN = truth.damper.damper.gas.at(truth.blocks.front().plan.mid, 1);
+  const bench::DryFriction& friction = truth.damper.damper.friction;
+  truth.dryFrictionN =
+      friction.form == bench::FrictionForm::Tanh ? friction.dry : friction.breakaway;
   truth.halfDifferenceN = (truth.compression.front().force + truth.rebound.front().force) / 2;
 }
 
@@ -110,7 +113,7 @@ std::vector<SampleFile> filesOf(const SampleDamper& damper, const bench::BenchRu
 }  // namespace
 
 SampleTruth truthOf(const SampleDamper& damper, const SampleVehicle& vehicle) {
-  const bench::BenchRun run = bench::simulate(damper.damper, damper.plan, damper.instrument, 5e-5);
+  const bench::BenchRun run = bench::simulate(damper.damper, damper.plan, damper.instrument, 1e-4);
   SampleTruth truth;
   truth.damper = damper;
   truth.blocks = run.blocks;

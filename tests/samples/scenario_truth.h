@@ -28,6 +28,7 @@ struct SampleTruth {
   std::vector<bench::HalfTruth> compression, rebound;  ///< of each block, conditioning left out
   std::vector<double> energy;                          ///< J, of each block
   double gasN = 0;                                     ///< at mid-stroke of the slow block
+  double dryFrictionN = 0;                             ///< of sliding, as its speed goes to zero
   double halfDifferenceN = 0;                          ///< at the slow block's largest speed
   double startC = 0, endC = 0;
   std::vector<PromisedCheck> checks;

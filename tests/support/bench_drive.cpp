@@ -139,7 +139,7 @@ void Drive::turn(const BlockPlan& plan) {
   DriveBlock block{plan, duration_, duration_ + seconds, {}};
   const Piece done = addTurning(even, seconds, endRate, 1 / seconds);
   const double growth = (endRate - rate) / seconds;
-  const double small = 0.3;  // rad that a ramp may take of a turn that still counts as even
+  const double small = 0.35;  // rad that a ramp may take of a turn that still counts as even
   if (even.phase < small) block.lowerTurnings.push_back(block.start - plan.ramp);
   for (int turn = 1; turn < plan.turns; ++turn) {
     const double way = 2 * pi * turn - even.phase;
