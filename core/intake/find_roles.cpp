@@ -258,6 +258,7 @@ class RoleFinder {
   void takeVelocityByShape() {
     if (!roles_.time.column || roles_.velocity.column) return;
     const Indices columns = unknown();
+    if (columns.size() > mostCompared) return;
     const Indices movers =
         roles_.displacement.column ? Indices{*roles_.displacement.column} : columns;
     for (const std::size_t mover : movers) {
@@ -301,6 +302,7 @@ class RoleFinder {
 
   static constexpr double clearlyRougher = 1.5;
   static constexpr std::size_t rowsForShape = 50;
+  static constexpr std::size_t mostCompared = 12;  // each with each takes time
   static constexpr double rowsOfACycle = 10;
 
   static bool oscillates(std::span<const double> values) {

@@ -4,6 +4,7 @@
 #include <algorithm>
 #include <array>
 #include <charconv>
+#include <cmath>
 #include <limits>
 #include <optional>
 
@@ -24,7 +25,9 @@ struct Count {
     count += many;
   }
   void add(const Count& other) {
-    if (other.count > 0) add(other.firstRow, other.count);
+    if (other.count == 0) return;
+    firstRow = count == 0 ? other.firstRow : std::min(firstRow, other.firstRow);
+    count += other.count;
   }
 };
 
@@ -257,24 +260,28 @@ class TableReader {
     return mark == std::string_view::npos ? 0 : cells[last].text.size() - mark - 1;
   }
 
-  // A good last row without line end whose last number is shorter than all before it: the file was
-  // still being written.
+  // A last row without line end is cut short where it is no good row, where its last number is
+  // missing, or where that is shorter than all before it: the file was still being written.
   void cutShortRow() {
-    const bool whole = !lastLine_ || lastLine_->terminated || columns_.rows == 0;
-    if (whole) return;
-    if (goodRows_ == columns_.rows && goodCount_ > formatRows) {
-      const std::size_t latest = (goodCount_ - 1) % formatRows;
-      const std::size_t width = tailLength(lastGood_[(latest + 1) % formatRows]);
-      for (std::size_t i = 0; i < formatRows; ++i) {
-        if (i != latest && tailLength(lastGood_[i]) != width) return;
-      }
-      if (tailLength(lastGood_[latest]) >= width) return;
+    if (!lastLine_ || lastLine_->terminated || columns_.rows == 0) return;
+    if (goodRows_ != columns_.rows) {
+      truncated_ = pending_.ragged.count + pending_.unreadable.count > 0;
+    } else if (lastNumberIsShort()) {
+      truncated_ = true;
       --goodRows_;
-    } else if (goodRows_ == columns_.rows ||
-               pending_.ragged.count + pending_.unreadable.count == 0) {
-      return;
     }
-    truncated_ = true;
+  }
+
+  bool lastNumberIsShort() const {
+    const std::vector<double>& last = columns_.values[dialect_.columns - 1];
+    if (!last.empty() && std::isnan(last.back())) return true;
+    if (goodCount_ <= formatRows) return false;
+    const std::size_t latest = (goodCount_ - 1) % formatRows;
+    const std::size_t width = tailLength(lastGood_[(latest + 1) % formatRows]);
+    for (std::size_t i = 0; i < formatRows; ++i) {
+      if (i != latest && tailLength(lastGood_[i]) != width) return false;
+    }
+    return tailLength(lastGood_[latest]) < width;
   }
 
   void addRemark(const Count& count, Remark remark) {

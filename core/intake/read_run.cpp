@@ -72,22 +72,20 @@ RunReading stoppedAtDecimal(const Layout& layout) {
   return reading;
 }
 
-// Reads the rows. Where a cell could not be read, all lines are asked once more how numbers are
-// written: the sample may have missed the lines that tell.
-Result<Columns> readRows(Layout& layout, const TextForm& form, const Progress& progress) {
-  const auto read = [&] {
-    return readColumns(
-        layout.decoded.text(), layout.lineEnd.letter, layout.dialect, layout.table, progress);
-  };
-  auto columns = read();
-  if (!columns || columns.value().unreadable == 0) return columns;
-  const auto full = fullDialect(layout, form);
-  const bool sameForm = !full || full.value().columns != layout.dialect.columns ||
-                        full.value().forms == layout.dialect.forms;
-  if (sameForm) return columns;
-  layout.dialect.forms = full.value().forms;
-  layout.dialect.open = full.value().open;
-  return read();
+// Whether all lines of the file, asked how numbers are written, say else than the sample did. The
+// layout then follows them.
+bool followsAllLines(Layout& layout, const TextForm& form) {
+  auto full = fullDialect(layout, form);
+  if (!full || full.value().columns != layout.dialect.columns) return false;
+  const bool changed =
+      full.value().forms != layout.dialect.forms || full.value().open != layout.dialect.open;
+  layout.dialect = std::move(full).value();
+  return changed;
+}
+
+Result<Columns> readRows(const Layout& layout, const Progress& progress) {
+  return readColumns(
+      layout.decoded.text(), layout.lineEnd.letter, layout.dialect, layout.table, progress);
 }
 
 Result<RunReading> readLaidOut(Layout layout,
@@ -95,15 +93,16 @@ Result<RunReading> readLaidOut(Layout layout,
                                const ReadOptions& options,
                                const std::optional<RigProfile>& rig,
                                const Progress& progress) {
-  if (!layout.dialect.open.empty()) {
-    auto full = fullDialect(layout, form);
-    if (full && full.value().columns == layout.dialect.columns) {
-      layout.dialect = std::move(full).value();
-    }
-  }
+  if (!layout.dialect.open.empty()) followsAllLines(layout, form);
   if (!layout.dialect.open.empty()) return stoppedAtDecimal(layout);
-  auto columns = readRows(layout, form, progress);
+  auto columns = readRows(layout, progress);
   if (!columns) return columns.error();
+  // The sample may have missed the lines that tell.
+  if (columns.value().unreadable > 0 && followsAllLines(layout, form)) {
+    if (!layout.dialect.open.empty()) return stoppedAtDecimal(layout);
+    columns = readRows(layout, progress);
+    if (!columns) return columns.error();
+  }
   if (columns.value().rows < fewestRows) {
     return Error{"too-few-rows",
                  {{"rows", static_cast<double>(columns.value().rows), Quantity::Count}},

@@ -10,6 +10,7 @@ namespace {
 
 constexpr std::size_t lineEndBytes = std::size_t{64} << 10;
 constexpr std::size_t headLines = 1000;
+constexpr std::size_t mostLines = 2'000'000;  // 100 MB to remember them
 constexpr std::size_t spreadPlaces = 40;
 constexpr std::size_t linesPerPlace = 25;
 constexpr std::size_t placeBytes = std::size_t{64} << 10;
@@ -105,7 +106,9 @@ Error lineTooLong(const Line& line) {
 Result<SampleLines> everyLine(std::string_view text, char lineEnd) {
   SampleLines lines;
   LineReader reader(text, lineEnd);
-  while (const auto line = reader.next()) {
+  while (lines.head.size() + lines.spread.size() < mostLines) {
+    const auto line = reader.next();
+    if (!line) break;
     if (line->text.size() > longestLine) return lineTooLong(*line);
     (lines.head.size() < headLines ? lines.head : lines.spread).push_back(*line);
   }

@@ -62,8 +62,8 @@ Error lineTooLong(const Line& line);
 /// Errors: line-too-long with its row.
 Result<SampleLines> sampleLines(std::string_view text, char lineEnd);
 
-/// All lines, the first ones as the head: for the rare file whose sample does not settle its
-/// dialect. Errors: line-too-long with its row.
+/// All lines (of a very long text the first two million), the first ones as the head: for the rare
+/// file whose sample does not settle its dialect. Errors: line-too-long with its row.
 Result<SampleLines> everyLine(std::string_view text, char lineEnd);
 
 }  // namespace dampwright
