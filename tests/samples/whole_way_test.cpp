@@ -143,9 +143,10 @@ TEST_P(SampleRun, PeakVelocityAndEnergyAreTheTrueOnes) {
     ASSERT_NE(measured, nullptr);
     const double speed = block.at("compression").at("peak_velocity_mm_s");
     const double energy = block.at("energy_j");
-    // the bench slows down for its stop within a block's last cycle: 0.13 % seen at 100 mm/s
-    EXPECT_NEAR(measured->compression.peakVelocity * 1e3, speed, 2e-3 * speed);
-    EXPECT_NEAR(measured->energy, energy, 2e-3 * energy);
+    // where 0.01 mm of noise on 15 or 25 mm, two slow cycles between rests, puts the turning points
+    EXPECT_NEAR(measured->compression.peakVelocity * 1e3, speed, 2e-4 * speed);
+    // 2 N of noise on a slow cycle's path: 2·v_rms·√samples·dt/√cycles = 0.9 mJ, four times that
+    EXPECT_NEAR(measured->energy, energy, std::max(1e-3 * energy, 3.5e-3));
   }
 }
 
