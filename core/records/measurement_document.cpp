@@ -9,20 +9,27 @@ namespace {
 
 constexpr DocumentKind measurementDocument{"measurement", 1};
 
-/// A figure with its standard uncertainty and degrees of freedom, which are null without it.
-struct Uncertain {
-  std::optional<double>& value;
+/// Whether a figure means anything; where it does not, it is null and stays at its default.
+enum class Known { Yes, No };
+
+Known known(const std::optional<double>& value) { return value ? Known::Yes : Known::No; }
+
+void numberIf(Fields& io, std::string_view key, double& value, Known is) {
+  std::optional<double> shown = is == Known::Yes ? std::optional(value) : std::nullopt;
+  io.number(key, shown);
+  if (is == Known::Yes) value = shown.value_or(unitOfKey(key).whenNull);
+}
+
+/// The standard uncertainty of a figure and its degrees of freedom: "force_n" and "_fit" are
+/// "force_n_fit_u" and "force_n_fit_dof".
+struct Uncertainty {
   double& u;
   double& dof;
 };
 
-void describe(Fields& io, const std::string& key, const std::string& part, Uncertain figure) {
-  std::optional<double> u = figure.value ? std::optional(figure.u) : std::nullopt;
-  std::optional<double> dof = figure.value ? std::optional(figure.dof) : std::nullopt;
-  io.number(key + part + "_u", u);
-  io.number(key + part + "_dof", dof);
-  figure.u = u.value_or(0);
-  figure.dof = figure.value ? dof.value_or(unitOfKey("dof").whenNull) : 0;
+void describe(Fields& io, const std::string& stem, Uncertainty uncertainty, Known is) {
+  numberIf(io, stem + "_u", uncertainty.u, is);
+  numberIf(io, stem + "_dof", uncertainty.dof, is);
 }
 
 void describe(Fields& io, MeasuredRun& run) {
@@ -38,15 +45,14 @@ void describe(Fields& io, std::string_view velocityKey, Reading& reading) {
   io.number(velocityKey, reading.peakVelocity);
   io.number("displacement_mm", reading.displacement);
   io.number("force_n", reading.force);
-  io.number("force_n_u", reading.forceTotalU);
-  io.number("force_n_dof", reading.forceTotalDof);
-  io.number("force_n_cycles_u", reading.forceU);
-  io.number("force_n_cycles_dof", reading.forceDof);
+  const Known read = reading.isRead() ? Known::Yes : Known::No;
+  describe(io, "force_n", {reading.forceTotalU, reading.forceTotalDof}, read);
+  describe(io, "force_n_cycles", {reading.forceU, reading.forceDof}, read);
   io.number("damping_force_n", reading.dampingForce);
   describe(io,
            "damping_force_n",
-           "",
-           {reading.dampingForce, reading.dampingForceTotalU, reading.dampingForceTotalDof});
+           {reading.dampingForceTotalU, reading.dampingForceTotalDof},
+           known(reading.dampingForce));
   io.number("largest_force_n", reading.largestForce);
   io.number("largest_force_n_cycles_u", reading.largestForceU);
   io.number("energy_j", reading.energy);
@@ -68,11 +74,13 @@ void describe(Fields& io, MeasuredBlock& measured) {
   io.number("end_s", block.end);
   io.derived("cycles", double(block.cycles.size()));
   io.derived("cycles_used", block.cyclesUsed());
-  io.number("frequency_hz", block.frequency);
+  const Known moves = block.kind == BlockKind::Hold ? Known::No : Known::Yes;
+  const Known holds = block.kind == BlockKind::Hold ? Known::Yes : Known::No;
+  numberIf(io, "frequency_hz", block.frequency, moves);
   io.number("stroke_mm", block.stroke);
   io.number("mid_mm", block.mid);
-  io.number("hold_force_n", block.holdForce);
-  io.number("hold_force_n_u", block.holdForceU);
+  numberIf(io, "hold_force_n", block.holdForce, holds);
+  numberIf(io, "hold_force_n_u", block.holdForceU, holds);
   io.number("temperature_c", block.temperature);
   io.number("energy_j", measured.energy);
   io.number("mean_power_w", measured.meanPower);
@@ -98,32 +106,32 @@ void describe(Fields& io, CurvePoint& point) {
 
 void describe(Fields& io, Gas& gas) {
   io.number("force_n", gas.force);
-  describe(io, "force_n", "", {gas.force, gas.totalU, gas.totalDof});
-  describe(io, "force_n", "_fit", {gas.force, gas.forceU, gas.forceDof});
+  describe(io, "force_n", {gas.totalU, gas.totalDof}, known(gas.force));
+  describe(io, "force_n_fit", {gas.forceU, gas.forceDof}, known(gas.force));
   io.number("rate_n_per_mm", gas.rate);
-  io.number("rate_n_per_mm_u", gas.rateU);
-  io.number("column_length_mm", gas.columnLength);
+  numberIf(io, "rate_n_per_mm_u", gas.rateU, known(gas.rate));
+  numberIf(io, "column_length_mm", gas.columnLength, known(gas.force));
   io.number("exponent", gas.exponent);
-  io.number("mid_mm", gas.mid);
+  numberIf(io, "mid_mm", gas.mid, known(gas.force));
   io.number("temperature_c", gas.temperature);
   io.text("method", gas.method);
   io.text("reason", gas.reason);
 }
 
 void describe(Fields& io, Friction& friction) {
-  const Uncertain dryTotal{friction.dry, friction.dryTotalU, friction.dryTotalDof};
-  const Uncertain halfTotal{
-      friction.halfDifference, friction.halfDifferenceTotalU, friction.halfDifferenceTotalDof};
   io.number("dry_n", friction.dry);
-  describe(io, "dry_n", "", dryTotal);
-  describe(io, "dry_n", "_fit", {friction.dry, friction.dryU, friction.dryDof});
+  const Known dry = known(friction.dry);
+  describe(io, "dry_n", {friction.dryTotalU, friction.dryTotalDof}, dry);
+  describe(io, "dry_n_fit", {friction.dryU, friction.dryDof}, dry);
   io.number("half_difference_n", friction.halfDifference);
-  describe(io, "half_difference_n", "", halfTotal);
+  const Known half = known(friction.halfDifference);
   describe(io,
            "half_difference_n",
-           "_cycles",
-           {friction.halfDifference, friction.halfDifferenceU, friction.halfDifferenceDof});
-  io.number("at_velocity_mm_s", friction.atVelocity);
+           {friction.halfDifferenceTotalU, friction.halfDifferenceTotalDof},
+           half);
+  describe(
+      io, "half_difference_n_cycles", {friction.halfDifferenceU, friction.halfDifferenceDof}, half);
+  numberIf(io, "at_velocity_mm_s", friction.atVelocity, half);
   io.text("method", friction.method);
   io.text("reason", friction.reason);
 }

@@ -21,24 +21,32 @@ double limitAt(const Judged& judged, const LimitRange& range) {
 }
 
 // Reasons give distances, not two figures to compare: a small difference is not rounded away.
+// Three digits of a distance are what a reader takes in.
+NamedValue distance(const char* name, double value, Quantity quantity) {
+  if (value == 0 || !std::isfinite(value)) return {name, value, quantity};
+  const double perStep = std::pow(10.0, 2 - std::floor(std::log10(std::abs(value))));
+  return {name, std::round(value * perStep) / perStep, quantity};
+}
+
 Reason simpleReason(const Judged& judged, double margin, double limit) {
   const Quantity quantity = judged.quantity;
-  if (margin >= 0) return Reason{"inside-limits", {{"margin", margin, quantity}}};
-  return Reason{"outside-limits", {{"beyond", -margin, quantity}, {"limit", limit, quantity}}};
+  if (margin >= 0) return Reason{"inside-limits", {distance("margin", margin, quantity)}};
+  return Reason{"outside-limits",
+                {distance("beyond", -margin, quantity), {"limit", limit, quantity}}};
 }
 
 Reason passReason(const Judged& judged, double margin) {
   return Reason{"inside-limits-surely",
-                {{"spare", margin - judged.expandedUncertainty, judged.quantity},
-                 {"uncertainty", judged.expandedUncertainty, judged.quantity}}};
+                {distance("spare", margin - judged.expandedUncertainty, judged.quantity),
+                 distance("uncertainty", judged.expandedUncertainty, judged.quantity)}};
 }
 
 Reason failReason(const Judged& judged, double margin, double limit) {
   return Reason{"outside-limits-surely",
-                {{"beyond", -margin, judged.quantity},
+                {distance("beyond", -margin, judged.quantity),
                  {"limit", limit, judged.quantity},
-                 {"excess", -margin - judged.expandedUncertainty, judged.quantity},
-                 {"uncertainty", judged.expandedUncertainty, judged.quantity}}};
+                 distance("excess", -margin - judged.expandedUncertainty, judged.quantity),
+                 distance("uncertainty", judged.expandedUncertainty, judged.quantity)}};
 }
 
 Reason openReason(const Judged& judged, const LimitRange& range, double margin, double limit) {
@@ -47,20 +55,20 @@ Reason openReason(const Judged& judged, const LimitRange& range, double margin, 
   if (range.min && range.max && *range.max - *range.min < 2 * uncertainty) {
     const double width = *range.max - *range.min;
     return Reason{"limits-narrower-than-uncertainty",
-                  {{"width", width, quantity},
-                   {"missing", 2 * uncertainty - width, quantity},
-                   {"uncertainty", uncertainty, quantity}}};
+                  {distance("width", width, quantity),
+                   distance("missing", 2 * uncertainty - width, quantity),
+                   distance("uncertainty", uncertainty, quantity)}};
   }
   if (margin >= 0) {
     return Reason{"close-inside-limit",
-                  {{"margin", margin, quantity},
+                  {distance("margin", margin, quantity),
                    {"limit", limit, quantity},
-                   {"overlap", uncertainty - margin, quantity}}};
+                   distance("overlap", uncertainty - margin, quantity)}};
   }
   return Reason{"close-outside-limit",
-                {{"beyond", -margin, quantity},
+                {distance("beyond", -margin, quantity),
                  {"limit", limit, quantity},
-                 {"overlap", uncertainty + margin, quantity}}};
+                 distance("overlap", uncertainty + margin, quantity)}};
 }
 
 }  // namespace

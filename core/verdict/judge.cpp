@@ -17,6 +17,12 @@ bool directionSettled(const Measurement& measurement) {
   });
 }
 
+// Where nothing is known of the rig, the uncertainty is only what the cycles show.
+void remarkUnknownRig(CheckVerdict& verdict, const RigAccuracy& rig) {
+  if (!rig.loadCell.readingPercent && !rig.loadCell.capacityPercent)
+    verdict.remarks.push_back(Remark{"rig-accuracy-not-known", Severity::Warning, {}});
+}
+
 // Measured value, uncertainty and decision of a figure that there is.
 void decideOn(CheckVerdict& verdict, const Figure& figure, const Limits& limits) {
   const Combined combined = combine(figure.budget);
@@ -55,6 +61,7 @@ CheckVerdict judgeCheck(const Measurement& measurement, const Limits& limits, co
   if (!figure.value) return notTested(verdict, figure.reason);
   if (!std::isfinite(*figure.value)) return notTested(verdict, {"figure-hidden", {}});
   decideOn(verdict, figure, limits);
+  remarkUnknownRig(verdict, measurement.rig);
   if (auto problem = conditionProblem(measurement, limits.conditions, figure))
     return notTested(verdict, *problem);
   return verdict;

@@ -86,6 +86,10 @@ constexpr Sentence rows[] = {
     {"waveform-differs",
      "The limits are for a {asked} motion, and this block is {found}.",
      "Test with this motion."},
+    {"rig-accuracy-not-known",
+     "The uncertainty holds no part for the load cell, because the rig profile does not say how "
+     "accurate it is.",
+     "Put the cell's certificate into the rig profile."},
     {"speed-outside-tested",
      "{velocity} lies just outside the speeds that were tested; the force was read along the end "
      "of "

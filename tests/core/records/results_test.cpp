@@ -3,6 +3,8 @@
 #include <gtest/gtest.h>
 
 #include <cmath>
+#include <fstream>
+#include <iterator>
 #include <nlohmann/json.hpp>
 
 #include "core/base/units.h"
@@ -53,6 +55,12 @@ Measurement fullMeasurement() {
   return made;
 }
 
+std::string example(const std::string& name) {
+  std::ifstream stream(std::string(DAMPWRIGHT_SOURCE_DIR "/tests/reference/documents/") + name,
+                       std::ios::binary);
+  return {std::istreambuf_iterator<char>(stream), {}};
+}
+
 template <class T>
 T valueOf(const Result<T>& result) {
   EXPECT_TRUE(result) << (result ? "" : englishLine(result.error()));
@@ -90,6 +98,7 @@ TEST(Results, WhatIsNotDeterminedIsNullAndNeverZero) {
   Measurement made = madeMeasurement();
   MeasuredBlock hold;
   hold.block.kind = BlockKind::Hold;
+  hold.block.holdForce = 98;
   hold.energy = hold.compression.force = std::nan("");
   made.blocks = {hold};
   const auto json = nlohmann::json::parse(writeMeasurement(made));
@@ -97,8 +106,12 @@ TEST(Results, WhatIsNotDeterminedIsNullAndNeverZero) {
   EXPECT_TRUE(json["gas"]["force_n_u"].is_null());
   EXPECT_TRUE(json["friction"]["dry_n_u"].is_null());
   EXPECT_TRUE(json["blocks"][0]["energy_j"].is_null());
+  EXPECT_TRUE(json["blocks"][0]["frequency_hz"].is_null());
+  EXPECT_EQ(json["blocks"][0]["hold_force_n"], 98);
   EXPECT_TRUE(json["blocks"][0]["compression"]["force_n"].is_null());
   EXPECT_TRUE(json["blocks"][0]["compression"]["damping_force_n_u"].is_null());
+  const auto moving = nlohmann::json::parse(writeMeasurement(fullMeasurement()));
+  EXPECT_TRUE(moving["blocks"][0]["hold_force_n"].is_null());
   const Measurement back = valueOf(readMeasurement(writeMeasurement(made), "m.json"));
   EXPECT_TRUE(std::isnan(back.blocks.at(0).compression.force));
 }
@@ -111,6 +124,17 @@ TEST(Results, NumbersStandInTheUnitOfTheirKey) {
   EXPECT_EQ(json["gas"]["rate_n_per_mm"], 1.2);
   EXPECT_EQ(json["laws"]["rebound"][0]["parameters"]["knee_mm_s"], 120);
   EXPECT_EQ(json["friction"]["at_velocity_mm_s"], 4);
+}
+
+// The examples were written by the program from the run that tests/batch makes (2000 N·s/m, no
+// gas), so they must come back to the byte.
+TEST(Results, ExamplesComeBackToTheByte) {
+  const std::string columns = example("columns.json");
+  const std::string measurement = example("measurement.json");
+  const std::string verdict = example("verdict.json");
+  EXPECT_EQ(writeColumns(valueOf(readColumns(columns, "columns.json"))), columns);
+  EXPECT_EQ(writeMeasurement(valueOf(readMeasurement(measurement, "m.json"))), measurement);
+  EXPECT_EQ(writeVerdict(valueOf(readVerdict(verdict, "verdict.json"))), verdict);
 }
 
 TEST(Results, AMeasurementThatPointsNowhereIsRefused) {

@@ -145,6 +145,14 @@ TEST(Decision, AReasonNeverComparesTwoFiguresThatPrintAlike) {
   EXPECT_NE(text.find("0.0004 N more than its uncertainty"), std::string::npos) << text;
 }
 
+TEST(Decision, ADistanceIsGivenInThreeDigitsAndTheLimitInAll) {
+  const Decision decision = guarded(1112.3456, 10.98765, {1129.5, {}});
+  EXPECT_EQ(
+      englishText(decision.reason.code, decision.reason.values),
+      "The figure lies 17.2 N outside the limit of 1129.5 N: 6.17 N more than its uncertainty "
+      "of 11 N explains.");
+}
+
 TEST(Decision, ATargetHasPercentAndNewtonsAdded) {
   Check check;
   check.target = 1150;

@@ -51,7 +51,7 @@ TEST(ForceCheck, BetweenTestedSpeedsTheCurveIsRead) {
 TEST(ForceCheck, JustOutsideTheTestedSpeedsIsRemarkedAndFartherIsNotTested) {
   const CheckVerdict near = judged(straight(), 0.8 * 1.04);
   EXPECT_NEAR(near.measured.value(), 1664, 1e-6);
-  ASSERT_EQ(near.remarks.size(), 1u);
+  ASSERT_FALSE(near.remarks.empty());
   EXPECT_EQ(near.remarks[0].code, "speed-outside-tested");
   const CheckVerdict far = judged(straight(), 0.8 * 1.06);
   EXPECT_EQ(far.verdict, VerdictWord::NotTested);
@@ -64,6 +64,14 @@ TEST(ForceCheck, TheRigsAccuraciesEnterTheBudget) {
   made.rig.loadCell.readingPercent = 1;
   // rectangular ±1 % of 800 N: 8/√3 = 4.6188 N, beside 8 N of the cycles
   EXPECT_NEAR(judged(made, 0.4).standardUncertainty, std::hypot(8, 8 / std::sqrt(3.0)), 1e-9);
+}
+
+TEST(ForceCheck, ARigOfUnknownAccuracyIsRemarked) {
+  Measurement made = straight();
+  ASSERT_EQ(judged(made, 0.4).remarks.size(), 1u);
+  EXPECT_EQ(judged(made, 0.4).remarks[0].code, "rig-accuracy-not-known");
+  made.rig.loadCell.readingPercent = 0.5;
+  EXPECT_TRUE(judged(made, 0.4).remarks.empty());
 }
 
 TEST(ForceCheck, GasIsTakenOffWhereTheLimitsAskForIt) {
