@@ -7,6 +7,7 @@
 #include <QStandardPaths>
 
 #include "ui/look/palette.h"
+#include "ui/look/style_sheet.h"
 #include "ui/look/type.h"
 
 int main(int count, char** arguments) {
@@ -17,6 +18,7 @@ int main(int count, char** arguments) {
   QApplication::setStyle(QStringLiteral("Fusion"));
   QApplication::setFont(dampwright::screenFont(dampwright::TextSize::Text));
   QApplication::setPalette(dampwright::asQPalette(dampwright::lightPalette()));
+  application.setStyleSheet(dampwright::styleSheet(dampwright::lightPalette()));
   testing::InitGoogleMock(&count, arguments);
   return RUN_ALL_TESTS();
 }

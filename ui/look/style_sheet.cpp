@@ -10,6 +10,16 @@ constexpr const char* sheet = R"(
 #card { background: @card; border: 1px solid @hairline; border-radius: 6px; }
 #notice { background: @paper; border: 1px solid @hairline; border-radius: 6px; }
 #notice[level="warning"] { border: 1px solid @evidence; }
+#topBar { background: @card; border: none; border-bottom: 1px solid @hairline; }
+QLabel#chip { background: @paper; color: @quiet; border: 1px solid @hairline; border-radius: 6px;
+  padding: 2px 8px; }
+QLabel#trouble { background: @paper; color: @evidence; border-bottom: 1px solid @evidence;
+  padding: 6px 20px; }
+QLabel#promise { background: @action; color: @onAction; border-radius: 6px; padding: 10px 20px;
+  font-weight: bold; }
+QPushButton#dropPlace { border: 2px dashed @bandOutline; background: @card; color: @quiet; }
+QPushButton#dropPlace:hover, QPushButton#dropPlace:focus { border: 2px dashed @action;
+  color: @action; }
 QLabel#quiet { color: @quiet; }
 QLabel#warning { color: @evidence; }
 QToolTip { background: @card; color: @ink; border: 1px solid @hairline; padding: 4px; }
@@ -20,10 +30,12 @@ QPushButton:hover, QToolButton:hover { border-color: @action; }
 QPushButton:focus, QToolButton:focus { border: 2px solid @action; padding: 3px 11px; }
 QPushButton:pressed, QToolButton:pressed { background: @selected; }
 QPushButton:disabled, QToolButton:disabled { color: @quiet; background: @paper; }
-QPushButton#primary { background: @action; color: @onAction; border-color: @action;
+QToolButton#more { border: 1px solid transparent; padding: 0; }
+QToolButton#more:focus, QToolButton#more:hover { border: 1px solid @action; }
+QPushButton#primary, QToolButton#primary { background: @action; color: @onAction; border-color: @action;
   font-weight: bold; }
-QPushButton#primary:focus { border: 2px solid @ink; }
-QPushButton#primary:disabled { background: @paper; color: @quiet; border-color: @hairline; }
+QPushButton#primary:focus, QToolButton#primary:focus { border: 2px solid @ink; }
+QPushButton#primary:disabled, QToolButton#primary:disabled { background: @paper; color: @quiet; border-color: @hairline; }
 QPushButton#link { border: none; background: transparent; color: @action; padding: 2px 4px;
   text-align: left; font-weight: bold; }
 QPushButton#link:focus { border: 2px solid @action; padding: 0px 2px; }
@@ -46,6 +58,14 @@ QMenu::item:selected { background: @action; color: @onAction; }
 QMenu::item:disabled { color: @quiet; background: transparent; }
 QMenu::separator { height: 1px; background: @hairline; margin: 4px 8px; }
 
+QTreeWidget, QTableView { background: @card; color: @ink; border: 1px solid @hairline;
+  border-radius: 6px; selection-background-color: @selected; selection-color: @ink; }
+QTreeWidget::item { min-height: 28px; }
+QTreeWidget:focus { border: 2px solid @action; }
+QTableView { border: none; }
+QTableView:focus { border: none; }
+QHeaderView::section { background: @card; color: @quiet; border: none;
+  border-bottom: 1px solid @hairline; padding: 4px 6px; }
 QScrollArea, QScrollArea > QWidget > QWidget { background: transparent; border: none; }
 QScrollBar:vertical { background: transparent; width: 10px; margin: 0; }
 QScrollBar::handle:vertical { background: @bandOutline; border-radius: 4px; min-height: 28px;

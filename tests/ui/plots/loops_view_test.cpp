@@ -8,6 +8,7 @@
 
 #include "tests/ui/made_measured.h"
 #include "ui/look/palette.h"
+#include "ui/look/style_sheet.h"
 #include "ui/plots/loop_plot.h"
 #include "ui/plots/run_plot.h"
 
@@ -166,7 +167,9 @@ TEST_F(LoopsViewTest, DrawsInBothThemes) {
   view.showInstant(Instant{3, 0.3, std::nullopt});
   QImage pictures[2];
   for (const bool dark : {false, true}) {
-    view.setPalette(asQPalette(dark ? darkPalette() : lightPalette()));
+    const Palette& palette = dark ? darkPalette() : lightPalette();
+    QApplication::setPalette(asQPalette(palette));
+    qApp->setStyleSheet(styleSheet(palette));
     QTest::qWait(50);
     pictures[dark] = view.grab().toImage();
     if (qEnvironmentVariableIsSet("DAMPWRIGHT_SHOTS"))
@@ -174,6 +177,8 @@ TEST_F(LoopsViewTest, DrawsInBothThemes) {
           qEnvironmentVariable("DAMPWRIGHT_SHOTS") +
           (dark ? QStringLiteral("/loops_dark.png") : QStringLiteral("/loops.png")));
   }
+  QApplication::setPalette(asQPalette(lightPalette()));
+  qApp->setStyleSheet(styleSheet(lightPalette()));
   const QPoint inAxes =
       view.forceVelocity()->mapTo(&view, view.forceVelocity()->axisRectangle().topLeft()) +
       QPoint(4, 4);

@@ -1,0 +1,181 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/verdict/verdict_panel.h"
+
+#include <QComboBox>
+#include <QHBoxLayout>
+#include <QLabel>
+#include <QPushButton>
+#include <QVBoxLayout>
+#include <algorithm>
+
+#include "ui/look/type.h"
+#include "ui/text/names.h"
+#include "ui/text/numbers.h"
+#include "ui/verdict/checks_table.h"
+#include "ui/verdict/notice_list.h"
+#include "ui/verdict/stamp_banner.h"
+
+namespace dampwright {
+
+namespace {
+
+QLabel* quietLabel() {
+  auto* label = new QLabel;
+  label->setObjectName(QStringLiteral("quiet"));
+  label->setFont(screenFont(TextSize::Quiet));
+  return label;
+}
+
+QLabel* heading(const QString& text) {
+  auto* label = new QLabel(text);
+  label->setFont(screenFont(TextSize::Heading));
+  return label;
+}
+
+QString limitsName(const Limits& limits) {
+  const QString title = QString::fromStdString(limits.title);
+  const QString revision = QString::fromStdString(limits.revision);
+  return revision.isEmpty() ? title : VerdictPanel::tr("%1, revision %2").arg(title, revision);
+}
+
+}  // namespace
+
+VerdictPanel::VerdictPanel(QWidget* parent)
+    : QFrame(parent),
+      stamp_(new StampBanner),
+      damper_(quietLabel()),
+      line_(new QLabel),
+      rule_(quietLabel()),
+      checksHeading_(heading(tr("Checks"))),
+      notesHeading_(heading(tr("Remarks"))),
+      limits_(new QComboBox),
+      checks_(new ChecksTable),
+      notices_(new NoticeList),
+      sheet_(new QPushButton(tr("Print sheet …"))) {
+  setObjectName(QStringLiteral("card"));
+  setFixedWidth(332);
+  line_->setWordWrap(true);
+  limits_->setSizeAdjustPolicy(QComboBox::AdjustToMinimumContentsLengthWithIcon);
+  limits_->setMinimumContentsLength(10);
+  limits_->setAccessibleName(tr("Limits"));
+  sheet_->setObjectName(QStringLiteral("primary"));
+  sheet_->setMinimumHeight(40);
+  buildColumn();
+  connect(limits_, &QComboBox::activated, this, &VerdictPanel::pickLimits);
+  connect(sheet_, &QPushButton::clicked, this, &VerdictPanel::sheetWanted);
+  connect(notices_, &NoticeList::directionSettled, this, &VerdictPanel::directionSettled);
+  connect(notices_, &NoticeList::dismissed, this, &VerdictPanel::dismiss);
+}
+
+void VerdictPanel::buildColumn() {
+  auto* limitsRow = new QHBoxLayout;
+  auto* limitsLabel = new QLabel(tr("Limits"));
+  limitsLabel->setBuddy(limits_);
+  limitsRow->addWidget(limitsLabel);
+  limitsRow->addWidget(limits_, 1);
+  auto* checksRow = new QHBoxLayout;
+  checksRow->addWidget(checksHeading_);
+  checksRow->addStretch();
+  checksRow->addWidget(rule_);
+  auto* column = new QVBoxLayout(this);
+  column->setContentsMargins(16, 16, 16, 16);
+  column->setSpacing(8);
+  column->addWidget(stamp_);
+  column->addWidget(damper_);
+  column->addWidget(line_);
+  column->addLayout(limitsRow);
+  column->addLayout(checksRow);
+  column->addWidget(checks_, 1);
+  column->addWidget(notesHeading_);
+  column->addWidget(notices_, 1);
+  column->addWidget(sheet_);
+}
+
+void VerdictPanel::setView(const VerdictView& view) {
+  view_ = view;
+  stamp_->setWord(view.word());
+  damper_->setText(QFontMetrics(damper_->font()).elidedText(view.damper, Qt::ElideMiddle, 298));
+  damper_->setToolTip(view.damper);
+  line_->setText(verdictLine(view));
+  checks_->setVerdict(view.verdict);
+  const bool judged = view.verdict && !view.verdict->checks.empty();
+  checks_->setVisible(judged);
+  checksHeading_->setVisible(judged);
+  showNotices();
+  sheet_->setEnabled(view.hasJob && view.measured);
+  showRule();
+  showLimits();
+}
+
+void VerdictPanel::showNotices() {
+  std::vector<NoticeView> shown;
+  for (const NoticeView& notice : view_.notices) {
+    const bool away = std::find(dismissed_.begin(), dismissed_.end(), notice) != dismissed_.end();
+    if (!away) shown.push_back(notice);
+  }
+  notices_->setNotices(shown);
+  notices_->setVisible(!shown.empty());
+  notesHeading_->setVisible(!shown.empty());
+}
+
+void VerdictPanel::dismiss(int problem) {
+  for (const NoticeView& notice : view_.notices) {
+    if (notice.action == NoticeAction::Dismiss && notice.index == problem)
+      dismissed_.push_back(notice);
+  }
+  showNotices();
+}
+
+void VerdictPanel::showDismissed() { dismissed_.clear(); }
+
+void VerdictPanel::showRule() {
+  if (!view_.verdict || view_.verdict->checks.empty()) return rule_->clear();
+  double factor = 0;
+  for (const CheckVerdict& check : view_.verdict->checks)
+    factor = std::max(factor, check.coverageFactor);
+  rule_->setText(
+      factor > 0 ? tr("%1, k up to %2")
+                       .arg(decisionRuleName(view_.verdict->decisionRule), numberText(factor, 2))
+                 : decisionRuleName(view_.verdict->decisionRule));
+}
+
+void VerdictPanel::showLimits() {
+  const QSignalBlocker quiet(limits_);
+  limits_->clear();
+  int current = -1;
+  for (const Limits& limits : view_.known) {
+    if (view_.chosen && limits == *view_.chosen) current = limits_->count();
+    limits_->addItem(limitsName(limits));
+  }
+  if (view_.chosen && current < 0) {
+    current = 0;
+    limits_->insertItem(0, limitsName(*view_.chosen));
+    view_.known.insert(view_.known.begin(), *view_.chosen);
+  }
+  limits_->addItem(tr("From file …"));
+  limits_->setPlaceholderText(tr("Choose limits"));
+  limits_->setCurrentIndex(current);
+  limits_->setToolTip(limits_->currentText());
+  limits_->setEnabled(view_.hasJob);
+}
+
+void VerdictPanel::pickLimits(int row) {
+  if (row >= 0 && row < static_cast<int>(view_.known.size())) {
+    emit limitsChosen(view_.known[static_cast<std::size_t>(row)]);
+  } else {
+    showLimits();  // "From file" is no choice by itself
+    emit limitsFileWanted();
+  }
+}
+
+void VerdictPanel::takeFocus() {
+  QWidget* part = checks_->isVisible() ? static_cast<QWidget*>(checks_) : limits_;
+  part->setFocus(Qt::ShortcutFocusReason);
+}
+
+void VerdictPanel::openLimits() {
+  limits_->setFocus();
+  limits_->showPopup();
+}
+
+}  // namespace dampwright

@@ -1,0 +1,54 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+#include <QFrame>
+
+#include "core/base/direction.h"
+#include "ui/verdict/verdict_view.h"
+
+class QComboBox;
+class QLabel;
+class QPushButton;
+
+namespace dampwright {
+
+class ChecksTable;
+class NoticeList;
+class StampBanner;
+
+/// The right part of the window: the verdict in one word, the checks, and what is to be said.
+/// Stamp, checks and the sheet's button never scroll away.
+class VerdictPanel : public QFrame {
+  Q_OBJECT
+ public:
+  explicit VerdictPanel(QWidget* parent = nullptr);
+
+  void setView(const VerdictView& view);
+  void showDismissed();  ///< what was put away is shown again: the files are others now
+  void takeFocus();      ///< to the checks, or to the limits while there are none
+  void openLimits();     ///< opens the list of limit sheets, for the action in menu and top bar
+
+ signals:
+  void limitsChosen(const dampwright::Limits& limits);
+  void limitsFileWanted();
+  void directionSettled(dampwright::Direction displacementPositive);
+  void sheetWanted();
+
+ private:
+  void buildColumn();
+  void showLimits();
+  void showNotices();
+  void dismiss(int problem);
+  void pickLimits(int row);
+  void showRule();
+
+  VerdictView view_;
+  std::vector<NoticeView> dismissed_;
+  StampBanner* stamp_;
+  QLabel *damper_, *line_, *rule_, *checksHeading_, *notesHeading_;
+  QComboBox* limits_;
+  ChecksTable* checks_;
+  NoticeList* notices_;
+  QPushButton* sheet_;
+};
+
+}  // namespace dampwright

@@ -1,0 +1,48 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+#include <QString>
+#include <optional>
+#include <vector>
+
+#include "core/verdict/verdict.h"
+#include "ui/session/session.h"
+
+namespace dampwright {
+
+/// Something said in plain words, with what can be done about it.
+enum class NoticeAction {
+  None,
+  SettleDirection,  ///< two answers: rising displacement is compression, or rebound
+  Dismiss           ///< a file that was not taken: read and put away
+};
+
+struct NoticeView {
+  QString title;  ///< what it is about: a file, a check; may be empty
+  QString text;   ///< what is so
+  QString hint;   ///< what to do; may be empty
+  bool warning = false;
+  NoticeAction action = NoticeAction::None;
+  int index = 0;  ///< of a drop problem
+
+  bool operator==(const NoticeView&) const = default;
+};
+
+/// Everything that the verdict part shows of the selected damper.
+struct VerdictView {
+  bool hasJob = false;
+  QString damper;  ///< "Rear left · DA-1109"
+  bool busy = false, measured = false;
+  std::optional<Verdict> verdict;
+  std::optional<Limits> chosen;  ///< of the job
+  std::vector<Limits> known;
+  std::vector<NoticeView> notices;  ///< most pressing first
+
+  VerdictWord word() const { return verdict ? verdict->word : VerdictWord::NotTested; }
+};
+
+VerdictView verdictView(const Session& session);
+
+/// One sentence below the stamp: the verdict in numbers, or what is missing for one.
+QString verdictLine(const VerdictView& view);
+
+}  // namespace dampwright
