@@ -36,8 +36,8 @@ std::vector<char> widened(const std::vector<char>& doubt, int bits, int before, 
 constexpr int forceBits = ForceClipped | ForceMissing;
 
 // Brings the force back by its delay; what would have to come from beyond the ends is missing.
-void undoDelay(Motion& motion, double delay) {
-  if (delay == 0) return;
+Motion withoutDelay(Motion motion, double delay) {
+  if (delay == 0) return motion;
   const double shift = delay * motion.rate;
   motion.force = shifted(motion.force, shift);
   std::vector<char> moved(motion.size());
@@ -52,6 +52,7 @@ void undoDelay(Motion& motion, double delay) {
         static_cast<char>((motion.doubtful[static_cast<std::size_t>(i)] & PlaceMissing) | force);
   }
   motion.doubtful = widened(moved, forceBits, 4, 4);
+  return motion;
 }
 
 // Turns per sample [rad] of the fastest part: the tenth percentile of the half strokes' durations.
@@ -73,39 +74,41 @@ LocalPolynomial derivativeOf(const Motion& motion) {
   return fit;
 }
 
-void takeOffInertia(Motion& motion, double mass, LocalPolynomial fit) {
-  if (mass == 0) return;
+Motion withoutInertia(Motion motion, double mass, LocalPolynomial fit) {
+  if (mass == 0) return motion;
   fit.derivative = 2;
   const std::vector<double> acceleration = applyLocal(fit, motion.displacement, motion.rate);
   for (std::size_t i = 0; i < motion.size(); ++i) motion.force[i] -= mass * acceleration[i];
   motion.doubtful = widened(motion.doubtful, PlaceMissing, fit.halfWidth, fit.halfWidth);
+  return motion;
 }
 
-void filter(Motion& motion, const std::optional<CfcClass>& cfc) {
-  if (!cfc || motion.rate <= 4.2 * cfc->number) return;
+Motion filtered(Motion motion, const std::optional<CfcClass>& cfc) {
+  if (!cfc || motion.rate <= 4.2 * cfc->number) return motion;
   motion.displacement = lowPass(*cfc, motion.rate, motion.displacement);
   motion.force = lowPass(*cfc, motion.rate, motion.force);
   const int reach = static_cast<int>(std::ceil(motion.rate / (cfc->number * 5 / 3) / 2));
   motion.doubtful = widened(motion.doubtful, forceBits | PlaceMissing, reach, reach);
+  return motion;
 }
 
 // The file's velocity against ours, by regression either way: noise on one of them leaves the
 // other's slope right. Agreed where 1 ± 3 % lies between the two slopes.
-void compareVelocity(Motion& motion, const std::vector<double>& recorded) {
-  if (recorded.empty()) return;
+std::optional<Remark> velocityRemark(const Motion& motion, const std::vector<double>& recorded) {
+  if (recorded.empty()) return std::nullopt;
   double own = 0, other = 0, both = 0;
   for (std::size_t i = 0; i < motion.size(); ++i) {
     own += motion.velocity[i] * motion.velocity[i];
     other += recorded[i] * recorded[i];
     both += motion.velocity[i] * recorded[i];
   }
-  if (own == 0 || other == 0) return;
+  if (own == 0 || other == 0) return std::nullopt;
   const double low = both / own, high = other / both, alike = both / std::sqrt(own * other);
-  if (alike > 0.5 && low < 1.03 && high > 0.97) return;
+  if (alike > 0.5 && low < 1.03 && high > 0.97) return std::nullopt;
   Remark remark{"velocity-disagrees", Severity::Warning, {}, 0, 0};
   const double ratio = std::copysign(std::sqrt(other / own), both);
   remark.values = {{"percent", 100 * ratio, Quantity::Percent}};
-  motion.remarks.push_back(std::move(remark));
+  return remark;
 }
 
 Error tooShort(const Trace& trace) {
@@ -127,12 +130,26 @@ bool longEnough(const Trace& trace) {
   return sound(trace.displacement) >= fewestRows && sound(trace.force) >= fewestRows;
 }
 
-void dropRepeated(std::vector<Remark>& remarks, const std::vector<Remark>& already) {
+std::vector<Remark> withoutRepeated(std::vector<Remark> remarks,
+                                    const std::vector<Remark>& already) {
   std::erase_if(remarks, [&](const Remark& remark) {
     return std::any_of(already.begin(), already.end(), [&](const Remark& known) {
       return known.code == remark.code;
     });
   });
+  return remarks;
+}
+
+Motion motionOf(RawChannels raw, const EvenClock& clock) {
+  Motion motion;
+  motion.rate = clock.rate;
+  motion.startTime = clock.start;
+  motion.displacement = std::move(raw.displacement);
+  motion.force = std::move(raw.force);
+  motion.temperature = std::move(raw.temperature);
+  motion.doubtful = std::move(raw.doubt);
+  motion.remarks = std::move(raw.remarks);
+  return motion;
 }
 
 }  // namespace
@@ -160,21 +177,14 @@ Result<Motion> condition(const Trace& trace, const ConditionOptions& options) {
                  {{"duration", trace.time.back() - trace.time.front(), Quantity::Time}},
                  {trace.source.file.name, 0, 0}};
   RawChannels raw = onEvenClock(lookThrough(trace, options.spikeThreshold), trace, clock);
-  Motion motion;
-  motion.rate = clock.clock.rate;
-  motion.startTime = clock.clock.start;
-  motion.displacement = std::move(raw.displacement);
-  motion.force = std::move(raw.force);
-  motion.temperature = std::move(raw.temperature);
-  motion.doubtful = std::move(raw.doubt);
-  motion.remarks = std::move(raw.remarks);
-  undoDelay(motion, options.forceDelay);
+  const std::vector<double> recordedVelocity = raw.velocity;
+  Motion motion = withoutDelay(motionOf(std::move(raw), clock.clock), options.forceDelay);
   const LocalPolynomial derivative = derivativeOf(motion);
-  takeOffInertia(motion, options.movingMass, derivative);
-  filter(motion, options.lowPass);
+  motion = withoutInertia(std::move(motion), options.movingMass, derivative);
+  motion = filtered(std::move(motion), options.lowPass);
   motion.velocity = applyLocal(derivative, motion.displacement, motion.rate);
-  compareVelocity(motion, raw.velocity);
-  dropRepeated(motion.remarks, trace.remarks);
+  if (auto remark = velocityRemark(motion, recordedVelocity)) motion.remarks.push_back(*remark);
+  motion.remarks = withoutRepeated(std::move(motion.remarks), trace.remarks);
   return motion;
 }
 

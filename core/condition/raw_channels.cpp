@@ -44,8 +44,9 @@ std::vector<double> filled(std::vector<double> values) {
   return values;
 }
 
-void mark(std::vector<char>& doubt, const std::vector<std::size_t>& samples, int bit) {
-  for (const std::size_t i : samples) doubt[i] = static_cast<char>(doubt[i] | bit);
+RawChannels marked(RawChannels raw, const std::vector<std::size_t>& samples, int bit) {
+  for (const std::size_t i : samples) raw.doubt[i] = static_cast<char>(raw.doubt[i] | bit);
+  return raw;
 }
 
 Remark remarkAt(const Trace& trace,
@@ -56,40 +57,44 @@ Remark remarkAt(const Trace& trace,
   return {code, severity, {}, static_cast<std::int64_t>(count), rowOf(trace, first)};
 }
 
-void takeMissing(RawChannels& raw, const Trace& trace) {
+RawChannels withMissing(RawChannels raw, const Trace& trace) {
   const std::vector<std::size_t> place = missingIn(trace.displacement);
   const std::vector<std::size_t> force = missingIn(trace.force);
-  mark(raw.doubt, place, PlaceMissing);
-  mark(raw.doubt, force, ForceMissing);
-  if (place.empty() && force.empty()) return;
+  if (place.empty() && force.empty()) return raw;
+  raw = marked(marked(std::move(raw), place, PlaceMissing), force, ForceMissing);
   const std::size_t first = std::min(place.empty() ? force.front() : place.front(),
                                      force.empty() ? place.front() : force.front());
-  raw.remarks.push_back(
-      remarkAt(trace, "missing-values", Severity::Warning, place.size() + force.size(), first));
+  const std::size_t count = place.size() + force.size();
+  raw.remarks.push_back(remarkAt(trace, "missing-values", Severity::Warning, count, first));
+  return raw;
 }
 
-std::vector<double> takeSpikes(RawChannels& raw,
-                               const Trace& trace,
-                               std::vector<double> channel,
-                               const std::string& name,
-                               double threshold) {
-  const std::vector<Spike> spikes = findSpikes(channel, threshold);
-  if (spikes.empty()) return channel;
+using Channel = std::vector<double> RawChannels::*;
+
+RawChannels withoutSpikesOf(RawChannels raw,
+                            Channel channel,
+                            const std::string& name,
+                            const Trace& trace,
+                            double threshold) {
+  const std::vector<Spike> spikes = findSpikes(raw.*channel, threshold);
+  if (spikes.empty()) return raw;
   Remark remark =
       remarkAt(trace, "spikes-removed", Severity::Note, spikes.size(), spikes.front().first);
   remark.values = {{"channel", name}};
   raw.remarks.push_back(std::move(remark));
-  return withoutSpikes(std::move(channel), spikes);
+  raw.*channel = withoutSpikes(std::move(raw.*channel), spikes);
+  return raw;
 }
 
-void takeClipped(RawChannels& raw, const Trace& trace) {
+RawChannels withClipped(RawChannels raw, const Trace& trace) {
   for (const ClippedSide& side : findClipped(raw.force)) {
-    mark(raw.doubt, side.samples, ForceClipped);
+    raw = marked(std::move(raw), side.samples, ForceClipped);
     Remark remark = remarkAt(
         trace, "clipped-force", Severity::Warning, side.samples.size(), side.samples.front());
     remark.values = {{"level", side.level, Quantity::Force}};
     raw.remarks.push_back(std::move(remark));
   }
+  return raw;
 }
 
 // Rows whose stamp is later than that of the row before.
@@ -126,21 +131,23 @@ std::vector<char> doubtOnClock(const std::vector<char>& doubt,
   return out;
 }
 
-void remarkClock(RawChannels& raw, const Trace& trace, const ClockFinding& finding) {
+std::vector<Remark> clockRemarks(const Trace& trace, const ClockFinding& finding) {
+  std::vector<Remark> remarks;
   if (finding.uneven) {
     Remark remark{"uneven-clock", Severity::Warning, {}, 0, 0};
     remark.values = {{"worst", finding.worstStep, Quantity::Time},
                      {"step", 1 / finding.clock.rate, Quantity::Time}};
-    raw.remarks.push_back(std::move(remark));
+    remarks.push_back(std::move(remark));
   }
-  if (finding.gapsBehind.empty()) return;
+  if (finding.gapsBehind.empty()) return remarks;
   double longest = 0;
   for (const std::size_t row : finding.gapsBehind)
     longest = std::max(longest, trace.time[row + 1] - trace.time[row]);
   Remark remark = remarkAt(
       trace, "gap", Severity::Warning, finding.gapsBehind.size(), finding.gapsBehind.front() + 1);
   remark.values = {{"longest", longest, Quantity::Time}};
-  raw.remarks.push_back(std::move(remark));
+  remarks.push_back(std::move(remark));
+  return remarks;
 }
 
 }  // namespace
@@ -148,18 +155,19 @@ void remarkClock(RawChannels& raw, const Trace& trace, const ClockFinding& findi
 RawChannels lookThrough(const Trace& trace, double spikeThreshold) {
   RawChannels raw;
   raw.doubt.resize(trace.displacement.size());
-  takeMissing(raw, trace);
-  raw.displacement =
-      takeSpikes(raw, trace, filled(trace.displacement), "displacement", spikeThreshold);
-  raw.force = takeSpikes(raw, trace, filled(trace.force), "force", spikeThreshold);
+  raw.displacement = filled(trace.displacement);
+  raw.force = filled(trace.force);
   raw.velocity = filled(trace.velocity);
   raw.temperature = filled(trace.temperature);
-  takeClipped(raw, trace);
-  return raw;
+  raw = withMissing(std::move(raw), trace);
+  raw = withoutSpikesOf(
+      std::move(raw), &RawChannels::displacement, "displacement", trace, spikeThreshold);
+  raw = withoutSpikesOf(std::move(raw), &RawChannels::force, "force", trace, spikeThreshold);
+  return withClipped(std::move(raw), trace);
 }
 
 RawChannels onEvenClock(RawChannels raw, const Trace& trace, const ClockFinding& finding) {
-  remarkClock(raw, trace, finding);
+  for (Remark& remark : clockRemarks(trace, finding)) raw.remarks.push_back(std::move(remark));
   if (finding.even) return raw;
   const std::vector<std::size_t> rows = risingRows(trace.time);
   const std::vector<double> times = picked(trace.time, rows);

@@ -13,11 +13,11 @@ namespace dampwright {
 namespace {
 
 constexpr double nan = std::numeric_limits<double>::quiet_NaN();
-constexpr std::array<double, 6> windowDegrees = {10, 14, 19, 25, 32, 40};  // to each side
+constexpr std::array<double, 6> windowDegrees = {10, 14, 19, 25, 30, 35};  // to each side
 constexpr int degree = 4;
 constexpr double fewestSamples = 9;  // in the narrowest window
 constexpr double soundSamples = 25;  // from which the residuals tell the noise
-constexpr double agreement = 1.5;    // standard errors of the difference
+constexpr double agreement = 3;      // standard errors of the difference
 
 std::size_t wrapped(std::ptrdiff_t i, std::size_t size) {
   const auto n = static_cast<std::ptrdiff_t>(size);

@@ -95,11 +95,11 @@ double longestMissing(const std::vector<char>& doubtful, double from, double to)
   return static_cast<double>(longest);
 }
 
-void addCycles(StrokeSummary& summary,
-               const Motion& motion,
-               const std::vector<TurningPoint>& turns,
-               std::size_t segment,
-               double offset) {
+std::vector<RawCycle> cyclesOf(const Motion& motion,
+                               const std::vector<TurningPoint>& turns,
+                               std::size_t segment,
+                               double offset) {
+  std::vector<RawCycle> cycles;
   for (std::size_t i = 0; i + 2 < turns.size(); ++i) {
     if (turns[i].upper) continue;
     const double up = turns[i + 1].value - turns[i].value;
@@ -111,8 +111,9 @@ void addCycles(StrokeSummary& summary,
                          (up + down) / 2,
                          segment};
     if (longestMissing(motion.doubtful, cycle.start, cycle.end) <= missingShare * cycle.period())
-      summary.cycles.push_back(cycle);
+      cycles.push_back(cycle);
   }
+  return cycles;
 }
 
 }  // namespace
@@ -139,7 +140,8 @@ StrokeSummary findCycles(const Motion& motion, double reversal, double holdTime)
           std::max(summary.longestStroke, std::abs(turns[i].value - turns[i - 1].value));
     summary.turningPoints += turns.size();
     turns = withoutFalseEdges(std::move(turns), noise);
-    addCycles(summary, motion, turns, segment++, static_cast<double>(part.from));
+    const auto cycles = cyclesOf(motion, turns, segment++, static_cast<double>(part.from));
+    summary.cycles.insert(summary.cycles.end(), cycles.begin(), cycles.end());
   }
   return summary;
 }

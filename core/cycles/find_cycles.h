@@ -26,12 +26,12 @@ struct StrokeSummary {
   double longestStroke = 0;  ///< m, largest half stroke
 };
 
-/// Cuts a motion where it rests (0.1 s or more) and at missing stretches, and what lies between into
-/// cycles from one lower turning point to the next. A rest is a dwell of the wave, and cuts nothing,
-/// if the motion rests as long at the turning point next to it, or at those of its kind before and
-/// after. Other rests of `holdTime` or more are holds. A half cycle at an edge counts only if the motion turned
-/// there: the edge lies within 0.5 % of the stroke, or six noise levels, of the next turning point
-/// of its kind. A cycle's two half strokes are alike to 10 %.
+/// Cuts a motion where it rests (0.1 s or more) and at missing stretches, and what lies between
+/// into cycles from one lower turning point to the next. A rest is a dwell of the wave, and cuts
+/// nothing, if the motion rests as long at the turning point next to it, or at those of its kind
+/// before and after. Other rests of `holdTime` or more are holds. A half cycle at an edge counts
+/// only if the motion turned there: the edge lies within 0.5 % of the stroke, or six noise levels,
+/// of the next turning point of its kind. A cycle's two half strokes are alike to 10 %.
 /// @param reversal  [1] share of its neighbours that a half stroke must exceed
 StrokeSummary findCycles(const Motion& motion, double reversal, double holdTime);
 

@@ -12,8 +12,12 @@ namespace dampwright {
 namespace {
 
 constexpr int highestHarmonic = 20;
+<<<<<<< Updated upstream
 // standard errors: 4 let noise pass once in 150 blocks, a 17th harmonic then costs 0.06 % of speed
 constexpr double standsOut = 5;
+=======
+constexpr double standsOut = 5;          // standard errors
+>>>>>>> Stashed changes
 constexpr double straightShare = 0.007;  // of the stroke
 constexpr double crankShare = 0.01;      // second harmonic over the first
 constexpr double sineShare = 0.03;       // all harmonics over the first
@@ -98,8 +102,10 @@ LoopShape loopShape(const Loop& loop) {
   std::vector<double> times(x.size());
   for (std::size_t i = 0; i < x.size(); ++i) times[i] = static_cast<double>(i) / n * period;
   const int order = std::min(highestHarmonic, static_cast<int>(loop.samples / 3));
+  // between samples the spline carries 0.8 of their noise
+  const double independent = loop.samples < n ? 0.64 * loop.samples : n;
   const Harmonics fit =
-      significantPart(fitHarmonics(times, x, period, order), std::min(loop.samples, n), standsOut);
+      significantPart(fitHarmonics(times, x, period, order), independent, standsOut);
   LoopShape shape;
   const bool triangle = isTriangle(x, loop.top, rough);
   shape.kind = triangle ? BlockKind::Triangle : kindOf(fit);

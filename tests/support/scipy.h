@@ -33,7 +33,7 @@ inline std::vector<double> pythonNumbers(const std::string& program) {
   const std::filesystem::path script =
       std::filesystem::temp_directory_path() / ("dampwright_" + std::to_string(getpid()) + ".py");
   std::ofstream(script) << program;
-  const std::string command = "/usr/bin/python3 -E -s '" + script.string() + "'";
+  const std::string command = "/usr/bin/python3 -I '" + script.string() + "'";
   std::FILE* pipe = popen(command.c_str(), "r");
   std::string printed;
   char part[4096];
