@@ -12,12 +12,8 @@ namespace dampwright {
 namespace {
 
 constexpr int highestHarmonic = 20;
-<<<<<<< Updated upstream
 // standard errors: 4 let noise pass once in 150 blocks, a 17th harmonic then costs 0.06 % of speed
 constexpr double standsOut = 5;
-=======
-constexpr double standsOut = 5;          // standard errors
->>>>>>> Stashed changes
 constexpr double straightShare = 0.007;  // of the stroke
 constexpr double crankShare = 0.01;      // second harmonic over the first
 constexpr double sineShare = 0.03;       // all harmonics over the first
