@@ -89,11 +89,13 @@ QString checkTitle(const Check& check) {
 QString targetText(const Check& check, Quantity quantity) {
   if (!check.target) return {};
   QString text = exactText(*check.target, quantity);
-  const QString plusMinus = noBreakSpace + QStringLiteral("±") + noBreakSpace;
+  const QString plusMinus = QStringLiteral("±") + noBreakSpace;  // its own number never leaves it
   if (check.tolerancePercent > 0) {
-    text += plusMinus + exactText(check.tolerancePercent, Quantity::Percent);
+    text += noBreakSpace + plusMinus + exactText(check.tolerancePercent, Quantity::Percent);
   }
-  if (check.toleranceAbsolute > 0) text += plusMinus + exactText(check.toleranceAbsolute, quantity);
+  if (check.toleranceAbsolute > 0) {
+    text += QLatin1Char(' ') + plusMinus + exactText(check.toleranceAbsolute, quantity);
+  }
   return text;
 }
 
