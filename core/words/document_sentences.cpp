@@ -64,6 +64,12 @@ constexpr Sentence rows[] = {
     {"document-bad-window",
      "The key {key}.temperature_c must hold two numbers, the lower one first.",
      "Write [from, to] in degrees Celsius, or null."},
+    {"sheet-not-written",
+     "The sheet was not written to {file}: {reason}.",
+     "Choose a folder that you may write to and that has room, then save again."},
+    {"printer-failed",
+     "The printer {printer} did not take the sheet.",
+     "Look at the printer, or save the sheet as a PDF and print that."},
 };
 
 }  // namespace

@@ -1,7 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/sheet/sheet_output.h"
 
+#include <QBuffer>
 #include <QCoreApplication>
+#include <QFileInfo>
 #include <QMarginsF>
 #include <QPageLayout>
 #include <QPdfWriter>
@@ -49,8 +51,11 @@ bool paintAll(QPdfWriter& writer, const SheetDocument& document) {
   return painter.end();
 }
 
-bool writePdf(QIODevice& device, const SheetDocument& document) {
-  QPdfWriter writer(&device);
+// In memory first: QPdfWriter does not notice that its device takes no more. Empty: it failed.
+QByteArray pdfBytes(const SheetDocument& document) {
+  QBuffer buffer;
+  buffer.open(QIODevice::WriteOnly);
+  QPdfWriter writer(&buffer);
   writer.setPdfVersion(QPdfWriter::PdfVersion_1_6);
   writer.setResolution(dotsPerInch);
   writer.setPageLayout(layoutOf(document.paper()));
@@ -59,18 +64,21 @@ bool writePdf(QIODevice& device, const SheetDocument& document) {
   for (const NamedAttachment& file : namedAttachments(document.content())) {
     writer.addFileAttachment(file.name, file.bytes, file.mimeType);
   }
-  return paintAll(writer, document);
+  return paintAll(writer, document) ? buffer.data() : QByteArray();
 }
 
 }  // namespace
 
 Result<Done> writeSheetPdf(const QString& path, const SheetDocument& document) {
+  // A device or a pipe of that name would be replaced by the file, not written to.
+  const QFileInfo there(path);
+  if (there.exists() && !there.isFile()) return notWritten(path, Sheet::tr("it is not a file"));
   QSaveFile file(path);
   if (!file.open(QIODevice::WriteOnly)) return notWritten(path, file.errorString());
-  if (!writePdf(file, document) || file.error() != QFileDevice::NoError) {
-    const QString reason = file.errorString();
-    file.cancelWriting();
-    return notWritten(path, reason);
+  const QByteArray bytes = pdfBytes(document);
+  if (bytes.isEmpty()) return notWritten(path, Sheet::tr("its pages could not be drawn"));
+  if (file.write(bytes) != bytes.size() || !file.flush()) {
+    return notWritten(path, file.errorString());
   }
   if (!file.commit()) return notWritten(path, file.errorString());
   return Done{};

@@ -59,8 +59,12 @@ inline Job job(const std::vector<std::string>& corners) {
   return job;
 }
 
-inline CheckVerdict scalarCheck(const char* kind, double y, double u, std::optional<double> min,
-                                std::optional<double> max, VerdictWord word) {
+inline CheckVerdict scalarCheck(const char* kind,
+                                double y,
+                                double u,
+                                std::optional<double> min,
+                                std::optional<double> max,
+                                VerdictWord word) {
   CheckVerdict judged;
   judged.check.check = kind;
   judged.measured = y;
@@ -82,8 +86,8 @@ inline Verdict nineChecks(VerdictWord word) {
   for (const Direction direction : {Direction::Rebound, Direction::Compression}) {
     for (const double speed : {0.1, 0.3, 0.6}) {
       const double y = readingAt(speed, direction).force;
-      verdict.checks.push_back(forceCheck(direction, speed, y * 0.92 - 20, y * 1.08 + 20,
-                                          VerdictWord::Pass));
+      verdict.checks.push_back(
+          forceCheck(direction, speed, y * 0.92 - 20, y * 1.08 + 20, VerdictWord::Pass));
     }
   }
   verdict.checks[0].check.target = 100;
