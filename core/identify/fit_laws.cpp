@@ -18,7 +18,7 @@ using Eigen::VectorXd;
 constexpr double nan = std::numeric_limits<double>::quiet_NaN();
 constexpr double rounding = 1e-9;     // [1] of the largest force: residuals below say nothing
 constexpr double sameStroke = 0.02;   // [1] strokes nearer than this are one
-constexpr int pointsToSpare = 3;      // beyond the parameters, for AICc to be trusted
+constexpr int pointsToSpare = 4;      // beyond the law's parameters: the friction's, and three
 constexpr double withinErrors = 2.0;  // standard errors
 
 std::span<const double> spanOf(const VectorXd& vector) {

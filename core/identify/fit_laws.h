@@ -20,11 +20,12 @@ struct ScatteredPoint {
 
 /// Lays every law of core/laws through the points by least squares of equal weight, and chooses.
 ///
-/// Chosen is the lowest AICc where every law has at least k + 3 points (k its parameters), else the
-/// simplest law whose residuals all lie within 2 standard errors of their points, else the closest.
-/// Standard errors of parameters come from the larger of the residual variance and the points' own
-/// mean variance, so that an accidental fit through few points looks no better than its points. A
-/// knee on a tested speed, where the sum of squares has its least from both sides, is converged.
+/// Chosen is the lowest AICc where every law has at least k + 3 points (k its parameters and the
+/// dry friction, which was determined apart but belongs to it), else the simplest law whose
+/// residuals all lie within 2 standard errors of their points, else the closest. Standard errors of
+/// parameters come from the larger of the residual variance and the points' own mean variance, so
+/// that an accidental fit through few points looks no better than its points. A knee on a tested
+/// speed, where the sum of squares has its least from both sides, is converged.
 /// @param points  by rising velocity
 /// @return one entry for each law, the simplest first
 std::vector<FittedLaw> fitLaws(std::span<const ScatteredPoint> points);

@@ -119,6 +119,19 @@ TEST(FitLaws, FewPointsTakeTheSimplestWithinTheirErrors) {
   EXPECT_TRUE(std::isinf(lawOf(bentLaws, "two-slope").aicc));
 }
 
+TEST(FitLaws, SixPointsOfABentCurveAreNotCalledLinear) {
+  // AICc would pay 40 for the two-slope law's three parameters here, more than the points can say.
+  const std::vector<ScatteredPoint> bent = {{{0.005, 2}, 0.1},
+                                            {{0.05, 20}, 0.1},
+                                            {{0.1, 50}, 0.1},
+                                            {{0.2, 143}, 0.1},
+                                            {{0.3, 260}, 0.1},
+                                            {{0.6, 700}, 0.1}};
+  const auto laws = fitLaws(bent);
+  EXPECT_EQ(chosenLaw(laws)->law, "two-slope");
+  EXPECT_EQ(chosenLaw(laws)->why, "law-closest");
+}
+
 TEST(FitLaws, NothingWithinErrorsTakesTheClosest) {
   const std::vector<ScatteredPoint> humped = {
       {{0.1, 100}, 1}, {{0.2, 300}, 1}, {{0.3, 200}, 1}, {{0.4, 500}, 1}};
