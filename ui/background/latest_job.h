@@ -17,20 +17,20 @@ class LatestJob : public QObject {
   template <class Compute, class Deliver>
   void start(Compute compute, Deliver deliver, Progressed progressed = {}) {
     stop();
-    stop_ = std::stop_source{};
+    stop_ = std::make_shared<std::stop_source>();
     runThere(*QThreadPool::globalInstance(),
              *this,
-             stop_.get_token(),
+             stop_,
              std::move(compute),
              std::move(deliver),
              std::move(progressed));
   }
 
   /// What runs is asked to end, and its result will not be delivered.
-  void stop() { stop_.request_stop(); }
+  void stop() { stop_->request_stop(); }
 
  private:
-  std::stop_source stop_{std::nostopstate};
+  Stop stop_ = std::make_shared<std::stop_source>();
 };
 
 }  // namespace dampwright

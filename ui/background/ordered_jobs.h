@@ -19,22 +19,17 @@ class OrderedJobs : public QObject {
   /// thread, unless stop() came first.
   template <class Compute, class Deliver>
   void add(Compute compute, Deliver deliver, Progressed progressed = {}) {
-    runThere(pool_,
-             *this,
-             stop_.get_token(),
-             std::move(compute),
-             std::move(deliver),
-             std::move(progressed));
+    runThere(pool_, *this, stop_, std::move(compute), std::move(deliver), std::move(progressed));
   }
 
   /// Everything added so far is asked to end, and will not be delivered; what is added later runs.
   void stop() {
-    stop_.request_stop();
-    stop_ = std::stop_source{};
+    stop_->request_stop();
+    stop_ = std::make_shared<std::stop_source>();
   }
 
  private:
-  std::stop_source stop_;
+  Stop stop_ = std::make_shared<std::stop_source>();
   QThreadPool pool_;
 };
 

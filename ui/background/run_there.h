@@ -6,6 +6,7 @@
 #include <QThreadPool>
 #include <QtConcurrent>
 #include <functional>
+#include <memory>
 #include <stop_token>
 #include <type_traits>
 #include <utility>
@@ -18,13 +19,16 @@ namespace dampwright {
 /// than the screen.
 using Progressed = std::function<void(double)>;
 
+/// By which work is asked to end. Shared, as GCC 12 takes copied stop tokens for a use after free.
+using Stop = std::shared_ptr<std::stop_source>;
+
 /// Runs `compute(progress)` on a thread of `pool` and `deliver(outcome)` on the thread of `owner`,
-/// unless `token` was stopped or the owner is gone by then. `compute` owns values only: it may
+/// unless `stop` was asked for or the owner is gone by then. `compute` owns values only: it may
 /// outlive everybody.
 template <class Compute, class Deliver>
 void runThere(QThreadPool& pool,
               QObject& owner,
-              const std::stop_token& token,
+              const Stop& stop,
               Compute compute,
               Deliver deliver,
               Progressed progressed) {
@@ -34,25 +38,25 @@ void runThere(QThreadPool& pool,
   QObject::connect(watcher,
                    &QFutureWatcherBase::finished,
                    &owner,
-                   [watcher, token, deliver = std::move(deliver)]() mutable {
+                   [watcher, stop, deliver = std::move(deliver)]() mutable {
                      watcher->deleteLater();
-                     if (!token.stop_requested()) deliver(watcher->future().takeResult());
+                     if (!stop->stop_requested()) deliver(watcher->future().takeResult());
                    });
   if (progressed) {
     QObject::connect(watcher,
                      &QFutureWatcherBase::progressValueChanged,
                      &owner,
-                     [token, progressed = std::move(progressed)](int step) {
-                       if (!token.stop_requested()) progressed(static_cast<double>(step) / steps);
+                     [stop, progressed = std::move(progressed)](int step) {
+                       if (!stop->stop_requested()) progressed(static_cast<double>(step) / steps);
                      });
   }
   watcher->setFuture(QtConcurrent::run(
-      &pool, [token, compute = std::move(compute)](QPromise<Outcome>& promise) mutable {
+      &pool, [stop, compute = std::move(compute)](QPromise<Outcome>& promise) mutable {
         promise.setProgressRange(0, steps);
         const auto report = [&promise](double share) {
           promise.setProgressValue(static_cast<int>(share * steps));
         };
-        promise.addResult(compute(Progress{token, report}));
+        promise.addResult(compute(Progress{stop->get_token(), report}));
       }));
 }
 

@@ -6,40 +6,19 @@
 #include <QUndoStack>
 #include <memory>
 #include <optional>
+#include <string>
 #include <vector>
 
 #include "core/base/result.h"
 #include "core/book/job_summary.h"
 #include "core/job/job.h"
-#include "core/measure/measure_runs.h"
-#include "core/verdict/verdict.h"
+#include "ui/background/ordered_jobs.h"
+#include "ui/session/book_keeper.h"
+#include "ui/session/dropped.h"
+#include "ui/session/phase_desk.h"
+#include "ui/session/phase_state.h"
 
 namespace dampwright {
-
-/// Which measurement: the damper of a corner and the index of its phase (as found, after work, a
-/// setting).
-struct PhaseKey {
-  QString corner;
-  int phase = 0;
-
-  bool operator==(const PhaseKey&) const = default;
-};
-
-/// What is known of one phase. `measured` and `verdict` are the newest results; `busy` while a
-/// newer one is made.
-struct PhaseState {
-  bool busy = false;
-  double progress = 0;
-  std::shared_ptr<const Measured> measured;
-  std::optional<Verdict> verdict;
-  std::optional<Error> problem;  ///< why there is no measurement
-};
-
-/// A file that was dropped and not taken, and why.
-struct DropProblem {
-  QString file;
-  Error error;
-};
 
 /// Sole owner of the open job, its measurements and verdicts. Every edit is an undo command, and
 /// each is written to the job book in a transaction at once: there is no save and no unsaved state.
@@ -61,14 +40,17 @@ class Session : public QObject {
       const;  ///< the job book's limit sheets, newest revision of each title
   const std::vector<JobSummary>& recentJobs() const;  ///< newest first, up to 50
   const std::vector<DropProblem>& dropProblems() const;
-  bool busy() const;  ///< files are read, measured or written, or the book is not read yet
-  /// The bytes of a run as they came. From any thread. Errors: run-file-missing, those of
+  bool busy() const;          ///< files are read, measured or written, or the book is not read yet
+  bool hasUnwritten() const;  ///< the book is in trouble, and something typed is only in memory
+  /// The bytes of a run as they came. Errors: run-file-missing, run-file-damaged, those of
   /// core/book.
   Result<std::string> bytesOfRun(const std::string& sha256) const;
   QUndoStack* undoStack();
 
  public slots:
   void select(const dampwright::PhaseKey& key);
+  /// Opens it at once; its number, the next free one ("2031-0007") or its own if that is free, is
+  /// there when the book has it (jobChanged).
   void startJob(const dampwright::Job& draft);
   void openJob(const QString& number);
   void openDemonstration();
@@ -100,16 +82,57 @@ class Session : public QObject {
                                               ///< kept. Empty: it is well again
 
  private:
-  void edit(const QString& text, Job after);
+  struct BookContents {  // what is read at the start
+    std::vector<Limits> limits;
+    std::vector<RigProfile> rigs;
+    std::vector<JobSummary> recentJobs;
+    std::optional<Job> lastJob;
+  };
+  /// The number of a new job is given by the book's thread when it is written; later writes of the
+  /// same job, which may already wait behind that, find it here.
+  using NumberCell = std::shared_ptr<std::string>;
+
+  static Result<BookContents> contentsOf(const Book& book);
+  void readContents();
+  void takeContents(BookContents contents);
+  void takeJob(const Job& job);                                             // from the book
+  void addJob(const Job& job, const QString& what, std::vector<RunBytes>);  // to the book, and open
+  void open(const Job& job, NumberCell number);
+  void remember(const NumberCell& number);  // as the last open job
   void put(const Job& job, const QString& what);
+  void putRig(const std::string& name, const std::optional<RigProfile>& rig, const QString& what);
+  void edit(const QString& text, Job after);
+  void editRig(const QString& text, const RigProfile& after);
+  void keepLimits(const Limits& limits);
+  bool limitsTaken(const Limits& limits) const;  // title and revision, by another sheet
+  std::vector<RunBytes> unstored(const Job& job) const;
+  void writeJob(const Job& job, const QString& what);
+  void takeDrop(std::vector<DroppedItem> items, const QString& corner);
+  void takeRuns(std::vector<DroppedRun> runs, const QString& corner);
+  void takeCard(const DamperCard& card, const QString& corner);
+  void takeLimits(const Limits& limits);
+  void takeDemonstration(std::vector<DroppedItem> items);
+  void say(const QString& file, Error error);
+  void tellTrouble(const Error& error);
+  RigProfile profileFor(const std::string& signature) const;
+  void refreshRecentJobs();
+  void noteVerdict();
+  void settle();
 
   QString bookFile_, sampleRuns_;
   std::optional<Job> job_;
+  NumberCell number_;
   PhaseKey selected_;
   std::vector<Limits> knownLimits_;
   std::vector<JobSummary> recentJobs_;
   std::vector<DropProblem> dropProblems_;
+  std::optional<VerdictWord> writtenVerdict_;
+  bool wasBusy_ = true, triedContents_ = false;
+  int drops_ = 0;  // being read
   QUndoStack undo_;
+  BookKeeper keeper_;
+  PhaseDesk desk_;
+  OrderedJobs intake_;
 };
 
 }  // namespace dampwright

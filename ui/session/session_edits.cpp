@@ -1,6 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 // The doors for edits: each makes a changed job and pushes it as an undo command.
-#include <QDateTime>
 #include <utility>
 
 #include "ui/session/change_job.h"
@@ -43,13 +42,6 @@ void Session::setDamper(const QString& corner, const DamperCard& card) {
 void Session::setJobDetails(const Job& details) {
   if (!hasJob()) return;
   edit(tr("job details"), withDetails(*job_, details));
-}
-
-void Session::chooseLimits(const Limits& limits) {
-  if (!hasJob()) return;
-  Job after = *job_;
-  after.limits = limits;
-  edit(tr("limits %1").arg(QString::fromStdString(limits.title)), std::move(after));
 }
 
 void Session::strikeOut(const PhaseKey& key, int run, const TimeSpan& span) {

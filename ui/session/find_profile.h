@@ -1,0 +1,20 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+#include <optional>
+#include <string_view>
+#include <vector>
+
+#include "core/rig/rig_profile.h"
+
+namespace dampwright {
+
+/// The first profile of a file layout's signature; the book hands them out last saved first.
+inline std::optional<RigProfile> findProfile(const std::vector<RigProfile>& profiles,
+                                             std::string_view signature) {
+  for (const RigProfile& profile : profiles) {
+    if (!signature.empty() && profile.signature == signature) return profile;
+  }
+  return std::nullopt;
+}
+
+}  // namespace dampwright

@@ -1,0 +1,88 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+// What comes of dropped files.
+#include <utility>
+
+#include "ui/session/change_job.h"
+#include "ui/session/place_runs.h"
+#include "ui/session/read_drop.h"
+#include "ui/session/session.h"
+
+namespace dampwright {
+
+void Session::dropFiles(const QStringList& paths, const QString& corner) {
+  if (paths.isEmpty()) return;
+  wasBusy_ = true;
+  if (drops_++ == 0 && !dropProblems_.empty()) {
+    dropProblems_.clear();
+    emit dropProblemsChanged();
+  }
+  intake_.add([task = DropTask{paths, desk_.profiles(), bookFile_}](
+                  const Progress& progress) { return readDrop(task, progress); },
+              [this, corner](std::vector<DroppedItem> items) {
+                --drops_;
+                takeDrop(std::move(items), corner);
+                settle();
+              });
+}
+
+// Documents first: a rig profile, a job or a card of the same drop counts for its runs.
+void Session::takeDrop(std::vector<DroppedItem> items, const QString& corner) {
+  std::vector<DroppedRun> runs;
+  std::vector<DamperCard> cards;
+  for (DroppedItem& item : items) {
+    if (auto* run = std::get_if<DroppedRun>(&item)) runs.push_back(std::move(*run));
+    if (auto* card = std::get_if<DamperCard>(&item)) cards.push_back(std::move(*card));
+    if (auto* job = std::get_if<DroppedJob>(&item)) {
+      addJob(job->job, tr("job dropped in"), job->files);
+    }
+    if (auto* rig = std::get_if<RigProfile>(&item)) editRig(tr("rig profile"), *rig);
+    if (auto* problem = std::get_if<DropProblem>(&item)) dropProblems_.push_back(*problem);
+  }
+  for (const DamperCard& card : cards) takeCard(card, corner);
+  if (!runs.empty()) takeRuns(std::move(runs), corner);
+  for (const DroppedItem& item : items) {
+    if (const auto* limits = std::get_if<Limits>(&item)) takeLimits(*limits);
+  }
+  if (!dropProblems_.empty()) emit dropProblemsChanged();
+}
+
+void Session::takeRuns(std::vector<DroppedRun> runs, const QString& corner) {
+  if (!hasJob()) {
+    Job draft;
+    draft.kind = vehicleOf(runs);
+    startJob(draft);
+  }
+  const Placed placed =
+      placeRuns(*job_, runs, corner.toStdString(), selected_.corner.toStdString());
+  for (const DroppedRun& run : runs) {
+    const bool taken = std::ranges::count(placed.files, run.bytes.sha256, &RunBytes::sha256) > 0;
+    if (taken) desk_.hold(run.bytes.sha256, {run.bytes.bytes, run.reading});
+  }
+  dropProblems_.insert(dropProblems_.end(), placed.problems.begin(), placed.problems.end());
+  edit(tr("add %n run(s)", nullptr, static_cast<int>(placed.files.size())), placed.job);
+  if (placed.last) select(*placed.last);
+}
+
+void Session::takeCard(const DamperCard& card, const QString& corner) {
+  if (!hasJob()) {
+    dropProblems_.push_back({QString::fromStdString(card.serial), {"no-open-job", {}, {}}});
+    return;
+  }
+  const Placed placed = placeCard(*job_, card, corner.toStdString());
+  dropProblems_.insert(dropProblems_.end(), placed.problems.begin(), placed.problems.end());
+  edit(tr("damper card"), placed.job);
+}
+
+void Session::takeLimits(const Limits& limits) {
+  if (limitsTaken(limits)) {
+    const Values which = {{"title", limits.title}, {"revision", limits.revision}};
+    dropProblems_.push_back(
+        {QString::fromStdString(limits.title), {"limits-revision-taken", which, {}}});
+  } else if (hasJob()) {
+    chooseLimits(limits);
+  } else {
+    keepLimits(limits);
+  }
+}
+
+}  // namespace dampwright
