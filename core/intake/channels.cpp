@@ -139,7 +139,7 @@ Remark unitAssumed(const SourceColumn& column,
                    std::span<const double> si) {
   return Remark{"unit-assumed",
                 Severity::Warning,
-                {{"column", column.name.empty() ? std::to_string(column.index) : column.name},
+                {{"column", columnLabel(column.name, static_cast<std::size_t>(column.index))},
                  {"unit", chosen.symbol},
                  {"span", rangeOf(si).span(), chosen.unit.quantity}}};
 }

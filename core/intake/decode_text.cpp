@@ -99,28 +99,54 @@ bool secondByteFits(unsigned char lead, unsigned char second) {
   return second >= 0x80 && second <= 0xBF;
 }
 
-// A letter cut short by the end of the file is allowed: the file may still be written.
-bool isUtf8(std::string_view bytes) {
+// Bytes of the letter at `i`, 0 where no letter stands there.
+std::size_t letterLength(std::string_view bytes, std::size_t i) {
+  const unsigned char lead = byteAt(bytes, i);
+  if (lead < 0x80) return 1;
+  const std::size_t followers = followersOf(lead);
+  if (followers == 0 || i + followers >= bytes.size()) return 0;
+  if (!secondByteFits(lead, byteAt(bytes, i + 1))) return 0;
+  for (std::size_t k = 2; k <= followers; ++k) {
+    if ((byteAt(bytes, i + k) & 0xC0) != 0x80) return 0;
+  }
+  return followers + 1;
+}
+
+// A letter cut short by the end is left out: the file may still be written.
+std::string_view withoutCutLetter(std::string_view bytes) {
+  for (std::size_t back = 1; back <= std::min<std::size_t>(3, bytes.size()); ++back) {
+    const unsigned char byte = byteAt(bytes, bytes.size() - back);
+    if ((byte & 0xC0) == 0x80) continue;
+    return followersOf(byte) >= back ? bytes.substr(0, bytes.size() - back) : bytes;
+  }
+  return bytes;
+}
+
+std::size_t firstBadByte(std::string_view bytes) {
   std::size_t i = 0;
   while (i < bytes.size()) {
-    if (i + 8 <= bytes.size()) {
-      std::uint64_t eight = 0;
-      std::memcpy(&eight, bytes.data() + i, 8);
-      if ((eight & 0x8080808080808080u) == 0) {
-        i += 8;
-        continue;
-      }
+    std::uint64_t eight = 0x80;
+    if (i + 8 <= bytes.size()) std::memcpy(&eight, bytes.data() + i, 8);
+    if ((eight & 0x8080808080808080u) == 0) {
+      i += 8;
+      continue;
     }
-    const unsigned char lead = byteAt(bytes, i++);
-    if (lead < 0x80) continue;
-    const std::size_t followers = followersOf(lead);
-    if (followers == 0) return false;
-    for (std::size_t k = 0; k < followers && i < bytes.size(); ++k, ++i) {
-      const unsigned char next = byteAt(bytes, i);
-      if (k == 0 ? !secondByteFits(lead, next) : (next & 0xC0) != 0x80) return false;
-    }
+    const std::size_t length = letterLength(bytes, i);
+    if (length == 0) return i;
+    i += length;
   }
-  return true;
+  return bytes.npos;
+}
+
+std::string withBadBytesReplaced(std::string_view bytes) {
+  std::string text;
+  while (true) {
+    const std::size_t bad = firstBadByte(bytes);
+    text.append(bytes.substr(0, bad));
+    if (bad == bytes.npos) return text;
+    text = withUtf8(std::move(text), replacement);
+    bytes.remove_prefix(bad + 1);
+  }
 }
 
 struct ZeroBytes {
@@ -162,8 +188,11 @@ DecodedText converted(std::string_view raw, const std::string& encoding) {
 DecodedText withoutZerosAtEnd(std::string_view bytes, std::string encoding) {
   const std::size_t last = bytes.find_last_not_of('\0');
   const std::string_view kept = bytes.substr(0, last == bytes.npos ? 0 : last + 1);
-  if (encoding.empty()) encoding = isUtf8(kept) ? "utf-8" : "windows-1252";
-  DecodedText decoded = converted(kept, encoding);
+  const std::string_view letters = withoutCutLetter(kept);
+  const bool valid = encoding != "windows-1252" && firstBadByte(letters) == bytes.npos;
+  if (encoding.empty()) encoding = valid ? "utf-8" : "windows-1252";
+  DecodedText decoded = converted(encoding == "utf-8" ? letters : kept, encoding);
+  if (encoding == "utf-8" && !valid) decoded.converted = withBadBytesReplaced(letters);
   decoded.zeroBytesAtEnd = static_cast<std::int64_t>(bytes.size() - kept.size());
   return decoded;
 }

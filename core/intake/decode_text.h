@@ -19,10 +19,11 @@ struct DecodedText {
   std::string_view text() const { return converted ? std::string_view(*converted) : raw; }
 };
 
-/// Finds the encoding: `asked` if given, byte order mark, UTF-16 by its zero bytes, UTF-8 if valid,
-/// else Windows-1252. Only the first 4096 bytes decide that a file is no text, so that 2 GB of
-/// zeros are refused at once. Errors: file-empty, file-is-picture, file-is-document,
-/// file-is-archive, file-is-binary, option-not-understood.
+/// Finds the encoding, and makes sure that the text is valid UTF-8 (what is no letter becomes
+/// U+FFFD): `asked` if given, byte order mark, UTF-16 by its zero bytes, UTF-8 if valid, else
+/// Windows-1252. Only the first 4096 bytes decide that a file is no text, so that 2 GB of zeros are
+/// refused at once. Errors: file-empty, file-is-picture, file-is-document, file-is-archive,
+/// file-is-binary, option-not-understood.
 Result<DecodedText> decodeText(std::string_view bytes, const std::optional<std::string>& asked);
 
 }  // namespace dampwright

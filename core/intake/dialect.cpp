@@ -150,7 +150,7 @@ Dialect withForms(Dialect dialect,
 }
 
 Error noTable(const std::vector<std::string_view>& rows) {
-  const std::string start(rows.empty() ? std::string_view{} : rows.front().substr(0, 40));
+  const std::string start(rows.empty() ? std::string_view{} : startOf(rows.front(), 40));
   return {"no-table", {{"start", withSingleBlanks(start)}}, {}};
 }
 

@@ -46,7 +46,7 @@ std::string label(Columns columns, std::size_t column) {
   const std::string& name = columns[column].heading.name;
   const auto same = std::ranges::count_if(
       columns, [&](const ColumnFacts& each) { return each.heading.name == name; });
-  return name.empty() || same > 1 ? std::to_string(column + 1) : name;
+  return columnLabel(same > 1 ? std::string() : name, column + 1);
 }
 
 std::string listOf(Columns columns) {

@@ -36,6 +36,12 @@ std::string lowered(std::string_view text) {
   return lower;
 }
 
+std::string_view startOf(std::string_view text, std::size_t bytes) {
+  if (text.size() <= bytes) return text;
+  while (bytes > 0 && (static_cast<unsigned char>(text[bytes]) & 0xC0) == 0x80) --bytes;
+  return text.substr(0, bytes);
+}
+
 std::string withSingleBlanks(std::string_view text) {
   std::string tidy;
   for (const char letter : trimmed(text)) {

@@ -118,8 +118,7 @@ class TraceMaker {
     shown.unit = chosen.value().symbol;
     shown.assumed = chosen.value().assumed || choice.why == "role-by-shape";
     if (chosen.value().volts) {
-      const std::string name = shown.name.empty() ? std::to_string(shown.index) : shown.name;
-      reading_.open.push_back({"unit", {name}, "--rig"});
+      reading_.open.push_back({"unit", {columnLabel(shown.name, *choice.column + 1)}, "--rig"});
       return std::vector<double>{};
     }
     auto values = toSi(column.values, chosen.value().unit, choice);

@@ -113,6 +113,10 @@ NameAndUnit splitNameAndUnit(std::string_view heading) {
   return {tidy, {}};
 }
 
+std::string columnLabel(std::string_view name, std::size_t number) {
+  return name.empty() ? std::to_string(number) : std::string(name);
+}
+
 Quantity quantityOf(Role role) {
   switch (role) {
     case Role::Time:

@@ -29,6 +29,9 @@ std::optional<Unit> readUnit(std::string_view symbol);
 /// A symbol without the brackets around it.
 std::string_view withoutBrackets(std::string_view symbol);
 
+/// What a column is called in a sentence: its name, or its number from 1 where it has none.
+std::string columnLabel(std::string_view name, std::size_t number);
+
 /// The quantity that a role is measured in; None for Role::Other.
 Quantity quantityOf(Role role);
 

@@ -204,7 +204,7 @@ class TableReader {
       } else if (isMissing(text)) {
         seen.missing.add(line.number);
       } else {
-        if (seen.unreadable.count == 0) seen.example = std::string(text.substr(0, 40));
+        if (seen.unreadable.count == 0) seen.example = std::string(startOf(text, 40));
         seen.unreadable.add(line.number);
       }
     }

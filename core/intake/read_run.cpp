@@ -51,10 +51,8 @@ std::vector<Remark> remarksOf(const Layout& layout) {
   }
   for (const std::size_t column : layout.dialect.settledByOthers) {
     if (column >= layout.table.columns.size()) continue;
-    const std::string& name = layout.table.columns[column].name;
-    remarks.push_back(Remark{"thousands-marks",
-                             Severity::Warning,
-                             {{"column", name.empty() ? std::to_string(column + 1) : name}}});
+    const std::string name = columnLabel(layout.table.columns[column].name, column + 1);
+    remarks.push_back(Remark{"thousands-marks", Severity::Warning, {{"column", name}}});
   }
   return remarks;
 }
@@ -72,15 +70,13 @@ RunReading stoppedAtDecimal(const Layout& layout) {
   return reading;
 }
 
-// Whether all lines of the file, asked how numbers are written, say else than the sample did. The
-// layout then follows them.
-bool followsAllLines(Layout& layout, const TextForm& form) {
+// What all lines of the file say of how numbers are written, where it is not what the sample said.
+std::optional<Dialect> otherDialect(const Layout& layout, const TextForm& form) {
   auto full = fullDialect(layout, form);
-  if (!full || full.value().columns != layout.dialect.columns) return false;
-  const bool changed =
-      full.value().forms != layout.dialect.forms || full.value().open != layout.dialect.open;
-  layout.dialect = std::move(full).value();
-  return changed;
+  if (!full || full.value().columns != layout.dialect.columns) return std::nullopt;
+  const bool same =
+      full.value().forms == layout.dialect.forms && full.value().open == layout.dialect.open;
+  return same ? std::nullopt : std::optional(std::move(full).value());
 }
 
 Result<Columns> readRows(const Layout& layout, const Progress& progress) {
@@ -93,16 +89,20 @@ Result<RunReading> readLaidOut(Layout layout,
                                const ReadOptions& options,
                                const std::optional<RigProfile>& rig,
                                const Progress& progress) {
-  if (!layout.dialect.open.empty()) followsAllLines(layout, form);
+  if (!layout.dialect.open.empty()) {
+    if (auto other = otherDialect(layout, form)) layout.dialect = std::move(*other);
+  }
   if (!layout.dialect.open.empty()) return stoppedAtDecimal(layout);
   auto columns = readRows(layout, progress);
-  if (!columns) return columns.error();
   // The sample may have missed the lines that tell.
-  if (columns.value().unreadable > 0 && followsAllLines(layout, form)) {
+  auto other =
+      columns && columns.value().unreadable > 0 ? otherDialect(layout, form) : std::nullopt;
+  if (other) {
+    layout.dialect = std::move(*other);
     if (!layout.dialect.open.empty()) return stoppedAtDecimal(layout);
     columns = readRows(layout, progress);
-    if (!columns) return columns.error();
   }
+  if (!columns) return columns.error();
   if (columns.value().rows < fewestRows) {
     return Error{"too-few-rows",
                  {{"rows", static_cast<double>(columns.value().rows), Quantity::Count}},

@@ -86,6 +86,13 @@ TEST(DecodeText, ALetterCutShortByTheEndIsAllowed) {
   const auto decoded = decodeText("1,2\n3,4 \xE2\x82", std::nullopt);
   ASSERT_TRUE(decoded);
   EXPECT_EQ(decoded.value().encoding, "utf-8");
+  EXPECT_EQ(decoded.value().text(), "1,2\n3,4 ");
+}
+
+TEST(DecodeText, BytesThatAreNoLettersOfAnAskedEncodingAreReplaced) {
+  const auto decoded = decodeText("D\xE4mpfer \xC3\xA4", "utf-8");
+  ASSERT_TRUE(decoded);
+  EXPECT_EQ(decoded.value().text(), "D\xEF\xBF\xBDmpfer ä");
 }
 
 TEST(DecodeText, ZerosAtTheEndAreCutOffAndCounted) {

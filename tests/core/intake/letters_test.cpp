@@ -22,5 +22,11 @@ TEST(Letters, RunsOfBlanksBecomeOne) {
   EXPECT_EQ(withSingleBlanks(" \t "), "");
 }
 
+TEST(Letters, AStartHoldsOnlyWholeLetters) {
+  EXPECT_EQ(startOf("Dämpfer", 2), "D");
+  EXPECT_EQ(startOf("Dämpfer", 3), "Dä");
+  EXPECT_EQ(startOf("D", 9), "D");
+}
+
 }  // namespace
 }  // namespace dampwright
