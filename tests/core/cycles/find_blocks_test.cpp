@@ -138,7 +138,7 @@ TEST(FindBlocks, ADwellAtTheTurningPointsMakesNoExtraCycle) {
   wave.dwell = 0.4;
   const auto blocks = moving(blocksOf(noisy(planOf({wave}))));
   ASSERT_EQ(blocks.size(), 1u);
-  EXPECT_EQ(blocks[0].cycles.size(), 4u);  // the first and the last have no dwell before and after
+  EXPECT_EQ(blocks[0].cycles.size(), 5u);  // before the first there was no dwell
   EXPECT_NEAR(blocks[0].frequency, 1 / 2.8, 1e-3);
   EXPECT_EQ(blocks[0].kind, BlockKind::Triangle);
 }
