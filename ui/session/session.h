@@ -97,7 +97,7 @@ class Session : public QObject {
   void takeContents(BookContents contents);
   void takeJob(const Job& job);                                             // from the book
   void addJob(const Job& job, const QString& what, std::vector<RunBytes>);  // to the book, and open
-  void open(const Job& job, NumberCell number);
+  void open(const Job& job, NumberCell number, const std::vector<RunBytes>& unwritten = {});
   void remember(const NumberCell& number);  // as the last open job
   void put(const Job& job, const QString& what);
   void putRig(const std::string& name, const std::optional<RigProfile>& rig, const QString& what);

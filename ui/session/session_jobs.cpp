@@ -19,9 +19,10 @@ std::string nowWithOffset() {
 
 }  // namespace
 
-void Session::open(const Job& job, NumberCell number) {
+void Session::open(const Job& job, NumberCell number, const std::vector<RunBytes>& unwritten) {
   undo_.clear();
   desk_.clear();
+  for (const RunBytes& file : unwritten) desk_.hold(file.sha256, {file.bytes, nullptr});
   job_ = job;
   number_ = std::move(number);
   writtenVerdict_.reset();
@@ -43,12 +44,13 @@ void Session::addJob(const Job& given, const QString& what, std::vector<RunBytes
   if (job.opened.empty()) job.opened = nowWithOffset();
   const NumberCell number = std::make_shared<std::string>();
   const auto add = [number, job, text = what.toStdString(), files](Book& book) -> Result<Done> {
-    Result<std::string> given_number = book.addJob(job, text, files);
-    if (!given_number) return given_number.error();
-    *number = std::move(given_number).value();
+    Result<std::string> numbered = book.addJob(job, text, files);
+    if (!numbered) return numbered.error();
+    *number = std::move(numbered).value();
     return Done{};
   };
-  const auto added = [this, number] {
+  const auto added = [this, number, files] {
+    for (const RunBytes& file : files) desk_.letBytesGo(file.sha256);
     if (number_ != number) return;
     job_->number = *number;
     emit jobChanged();
@@ -56,7 +58,7 @@ void Session::addJob(const Job& given, const QString& what, std::vector<RunBytes
   };
   keeper_.write({add, added});
   remember(number);
-  open(job, number);
+  open(job, number, files);
 }
 
 void Session::startJob(const Job& draft) { addJob(draft, tr("new job"), {}); }
