@@ -42,6 +42,8 @@ Result<Stored> measurementOf(const BatchRequest& request) {
   return Stored{std::move(measured).value(), sha256};
 }
 
+}  // namespace
+
 int statusOf(VerdictWord word) {
   switch (word) {
     case VerdictWord::Pass:
@@ -54,8 +56,6 @@ int statusOf(VerdictWord word) {
   }
   return exit_status::open;
 }
-
-}  // namespace
 
 Result<BatchAnswer> judgeVerb(const BatchRequest& request) {
   const auto text = loadInput(request.limits);

@@ -5,6 +5,7 @@
 #include "app/batch_request.h"
 #include "core/base/result.h"
 #include "core/measure/measurement.h"
+#include "core/verdict/verdict.h"
 
 namespace dampwright {
 
@@ -18,6 +19,9 @@ struct BatchAnswer {
 Result<BatchAnswer> columnsVerb(const BatchRequest& request);
 Result<BatchAnswer> measureVerb(const BatchRequest& request);
 Result<BatchAnswer> judgeVerb(const BatchRequest& request);
+
+/// What a program ends with after this verdict.
+int statusOf(VerdictWord word);
 
 /// Runs `dampwright` beside this program with the same arguments and without a window, in place of
 /// this process: only comes back with an error, sheet-program-missing {path}.

@@ -5,7 +5,7 @@
 #include <QPen>
 
 #include "ui/look/palette.h"
-#include "ui/text/names.h"
+#include "ui/text/cautions.h"
 
 namespace dampwright {
 
@@ -30,21 +30,9 @@ QString reading() {
       "U not taken off. Forces count in the direction that resists the motion.");
 }
 
-QString cautions() {
-  return Sheet::tr(
-      "Gas-charged dampers are under pressure: do not puncture, heat or open one before its charge "
-      "is let out by the maker's procedure. A coil-over's spring stores enough energy to kill: "
-      "take "
-      "it off with a proper compressor before the bench test, and never stand in line with it. "
-      "Keep "
-      "hands clear of the moving crosshead, use the guard and the stop button. The body gets hot "
-      "enough to burn. Wear eye protection. Stay inside the damper's stroke and the load cell's "
-      "range.");
-}
-
 SheetBlock cautionBox(double width) {
   const TextStyle title = paperBold(8), text = paperText(7.5);
-  const QStringList lines = wrapped(cautions(), width - 6, text);
+  const QStringList lines = wrapped(cautions().join(QLatin1Char(' ')), width - 6, text);
   const double height =
       3 + lineHeight(title) + lineHeight(text) * static_cast<double>(lines.size());
   const auto paint = [=](QPainter& painter, const QRectF& box) {

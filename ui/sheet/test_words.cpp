@@ -31,13 +31,20 @@ void addRemarks(QStringList& lines,
   }
 }
 
+// What the frame above the plots has said already.
+bool isWaitedFor(const Verdict& verdict, const CheckVerdict& check) {
+  return std::any_of(verdict.waiting.begin(), verdict.waiting.end(), [&](const Reason& reason) {
+    return reason.code == check.reason.code;
+  });
+}
+
 }  // namespace
 
 QStringList reasonWords(const SheetPhase& phase) {
   if (!phase.verdict) return {};
   std::vector<std::pair<QString, QStringList>> byReason;  // reason, titles
   for (const CheckVerdict& check : phase.verdict->checks) {
-    if (check.verdict == VerdictWord::Pass) continue;
+    if (check.verdict == VerdictWord::Pass || isWaitedFor(*phase.verdict, check)) continue;
     const CheckText text = checkText(check);
     if (text.reason.isEmpty()) continue;
     const auto same = std::find_if(byReason.begin(), byReason.end(), [&](const auto& row) {
