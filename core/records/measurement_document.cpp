@@ -163,6 +163,7 @@ void describe(Fields& io, RigAccuracy& rig) {
   io.number("displacement_accuracy_mm", rig.displacementAccuracy);
   io.number("clock_accuracy_percent", rig.clockAccuracyPercent);
   io.number("remount_percent", rig.remountPercent);
+  io.text("low_pass", rig.lowPass);
 }
 
 // Two lists, one for each direction.

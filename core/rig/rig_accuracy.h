@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 #include <optional>
+#include <string>
 
 #include "core/rig/rig_profile.h"
 
@@ -14,12 +15,17 @@ struct RigAccuracy {
   std::optional<double> displacementAccuracy;  ///< m, limit of error
   std::optional<double> clockAccuracyPercent;  ///< %, limit of error
   std::optional<double> remountPercent;        ///< %, standard uncertainty
+  std::optional<std::string> lowPass;          ///< filter that was used, as in the profile
 
   bool operator==(const RigAccuracy&) const = default;
 };
 
 inline RigAccuracy accuracyOf(const RigProfile& rig) {
-  return {rig.loadCell, rig.displacementAccuracy, rig.clockAccuracyPercent, rig.remountPercent};
+  return {rig.loadCell,
+          rig.displacementAccuracy,
+          rig.clockAccuracyPercent,
+          rig.remountPercent,
+          rig.lowPass};
 }
 
 }  // namespace dampwright

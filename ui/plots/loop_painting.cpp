@@ -141,7 +141,7 @@ class Canvas {
   }
 
   void paintLabels() {
-    for (const double tick : ticksOf(x_)) {
+    for (const double tick : labelledTicks()) {
       const QRectF box(
           place({tick, 0}).x() - 50 * mm(), axes_.bottom() + 0.7 * mm(), 100 * mm(), line_);
       drawText(painter_, box, tickText(tick, x_.step), label(), Qt::AlignCenter);
@@ -151,17 +151,36 @@ class Canvas {
           axes_.left() - 51 * mm(), place({0, tick}).y() - line_, 50 * mm(), 2 * line_);
       drawText(painter_, box, tickText(tick, y_.step), label(), Qt::AlignRight | Qt::AlignVCenter);
     }
-    drawText(painter_,
-             {axes_.left(), area_.bottom() - line_, axes_.width(), line_},
-             figureXTitle(figure_.kind),
-             label(),
-             Qt::AlignCenter);
+    paintXTitle();
     paintSidewaysTitle();
     paintDirectLabels();
     drawText(painter_,
              {area_.left(), area_.top(), area_.width(), line_},
              figureTitle(figure_.kind),
              {style_.text, true, colours_.ink});
+  }
+
+  // Of a narrow plot every second or third tick, counted from zero, so that no labels touch.
+  std::vector<double> labelledTicks() const {
+    double widest = 0;
+    for (const double tick : ticksOf(x_))
+      widest = std::max(widest, textWidth(tickText(tick, x_.step), label()));
+    const double spacing = axes_.width() * x_.step / (x_.high - x_.low);
+    const double stride = std::ceil((widest + mm()) / spacing);
+    std::vector<double> ticks = ticksOf(x_);
+    std::erase_if(ticks, [&](double tick) {
+      return std::abs(std::remainder(std::round(tick / x_.step), stride)) > 0.5;
+    });
+    return ticks;
+  }
+
+  // Under the middle of the axis, or as near to it as the area allows.
+  void paintXTitle() {
+    const QString title = figureXTitle(figure_.kind);
+    const double width = textWidth(title, label());
+    const double left =
+        std::max(area_.left(), std::min(axes_.center().x() - width / 2, area_.right() - width));
+    drawText(painter_, {left, area_.bottom() - line_, width, line_}, title, label());
   }
 
   void paintSidewaysTitle() {
@@ -182,9 +201,9 @@ class Canvas {
               Qt::AlignRight);
     }
     if (!figure_.gasLine.empty()) {
-      // Loops leave the corners of their plot empty; beside the line there is no room for words.
-      labelAt({axes_.right() - 51 * mm(), axes_.top() + 0.5 * mm(), 50 * mm(), line_},
-              Plots::tr("dashed: gas force"),
+      // On the line of the title: beside the dashed line and among the loops there is no room.
+      labelAt({axes_.right() - 50 * mm(), area_.top(), 50 * mm(), line_},
+              Plots::tr("dashed: gas"),
               Qt::AlignRight);
     }
     const double gap = 1.1 * line_ * (y_.high - y_.low) / axes_.height();

@@ -99,7 +99,10 @@ QString forceText(const SheetPhase& phase) {
   const QString zero = eachOnce(measurement.runs, [](const MeasuredRun& run) {
     return Sheet::tr("force zero %1").arg(zeroStateText(run.zeroState));
   });
+  const std::optional<std::string>& filter = measurement.rig.lowPass;
   QStringList parts = {zero};
+  parts << (filter ? Sheet::tr("filter %1").arg(QString::fromStdString(*filter))
+                   : Sheet::tr("no filter"));
   if (phase.verdict) {
     parts << Sheet::tr("judged: %1").arg(forceBasisName(phase.verdict->forceBasis));
   }

@@ -228,6 +228,7 @@ SheetSection phaseSection(const SheetItem& item,
     addFigures(section, phase, arrangement, width);
     append(section, marked(reasonWords(phase), width, paperText(8)));
     append(section, marked(remarkWords(phase), width, paperText(8)));
+    section.push_back(space(0.8));
     append(section, labelledGrid(ownConditions(phase, common), width, 1, 20, 7.5));
   } else {
     append(section, marked(problemWords(phase), width, paperText(8.5)));

@@ -50,7 +50,7 @@ void paintInventedMark(QPainter& painter, const QRectF& box) {
 }  // namespace
 
 QString jobName(const Job& job) {
-  if (job.number.empty()) return Sheet::tr("Without a job number");
+  if (job.number.empty()) return Sheet::tr("No job number");
   return Sheet::tr("Job %1").arg(QString::fromStdString(job.number));
 }
 

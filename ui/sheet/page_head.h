@@ -15,7 +15,7 @@ void paintPageHead(
 void paintPageFoot(
     QPainter& painter, const QRectF& box, const SheetContent& content, int page, int pages);
 
-/// "Job 2041", or "Without a job" where runs were put on a sheet from the command line.
+/// "Job 2041", or "No job number" where runs were put on a sheet from the command line.
 QString jobName(const Job& job);
 
 }  // namespace dampwright

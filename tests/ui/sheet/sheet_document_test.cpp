@@ -4,6 +4,8 @@
 #include <gtest/gtest.h>
 
 #include <QImage>
+#include <QRegularExpression>
+#include <QSet>
 
 #include "tests/ui/sheet/made_sheet.h"
 #include "tests/ui/sheet/pdf_tools.h"
@@ -93,6 +95,7 @@ TEST_P(EachPaper, ConditionsCautionsAndScopeAreThere) {
              "30 °C to 34 °C",
              "force zero with no damper on the rig",
              "gas force removed",
+             "no filter",
              "bench 1",
              "calibrated 10 January 2031",
              "DA-1107 as found.csv",
@@ -230,17 +233,24 @@ TEST_P(EachPaper, ASheetWithoutLimitsIsMeasuredNotJudged) {
 
 INSTANTIATE_TEST_SUITE_P(A4AndLetter, EachPaper, testing::Values(PaperSize::A4, PaperSize::Letter));
 
+// Whole numbers are left aside: plots of another height have other ticks and speed labels.
 TEST(SheetDocuments, BothPapersSayTheSame) {
   const SheetContent content = made::sheet(made::job({"rear left"}), {Fail});
+  const QRegularExpression tick(QStringLiteral("^[−0-9]+$"));
   QTemporaryDir folder;
-  QStringList words[2];
+  QSet<QString> words[2];
   for (int i = 0; i < 2; ++i) {
     const QString path = folder.filePath(QString::number(i));
     ASSERT_TRUE(writeSheetPdf(path, SheetDocument(content, static_cast<PaperSize>(i))));
-    words[i] = pdfText(path).split(QLatin1Char(' '));
-    words[i].sort();
+    for (const QString& word : pdfText(path).split(QLatin1Char(' '))) {
+      if (!tick.match(word).hasMatch()) words[i].insert(word);
+    }
   }
-  EXPECT_EQ(words[0], words[1]);
+  const auto missing = [](QSet<QString> from, const QSet<QString>& in) {
+    return from.subtract(in).values().join(QLatin1Char(' ')).toStdString();
+  };
+  EXPECT_EQ(missing(words[0], words[1]), "");
+  EXPECT_EQ(missing(words[1], words[0]), "");
 }
 
 }  // namespace
