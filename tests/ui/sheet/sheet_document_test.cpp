@@ -242,7 +242,9 @@ TEST(SheetDocuments, BothPapersSayTheSame) {
   for (int i = 0; i < 2; ++i) {
     const QString path = folder.filePath(QString::number(i));
     ASSERT_TRUE(writeSheetPdf(path, SheetDocument(content, static_cast<PaperSize>(i))));
-    for (const QString& word : pdfText(path).split(QLatin1Char(' '))) {
+    // A line may end at a hyphen on one paper only.
+    const QString text = pdfText(path).replace(QStringLiteral("- "), QStringLiteral("-"));
+    for (const QString& word : text.split(QLatin1Char(' '))) {
       if (!tick.match(word).hasMatch()) words[i].insert(word);
     }
   }
