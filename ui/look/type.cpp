@@ -2,6 +2,7 @@
 #include "ui/look/type.h"
 
 #include <QFontMetricsF>
+#include <QRegularExpression>
 #include <QTextLayout>
 #include <algorithm>
 #include <cmath>
@@ -22,6 +23,16 @@ QFont designFont(const TextStyle& style) {
 }
 
 double perDesign(const TextStyle& style) { return style.size / designSize; }
+
+constexpr QChar wordJoiner(0x2060);  // no width, and no line ends beside it
+
+// No line may end inside a unit (mm/s), a range (870–1120) or before what a dash leads to.
+QString unbroken(QString text) {
+  static const QRegularExpression slash(QStringLiteral("(?<=[A-Za-z])/(?=(s|m|mm)\\b)"));
+  static const QRegularExpression dash(QStringLiteral("–(?=[\\d\u00A0])"));
+  const QString joiner(wordJoiner);
+  return text.replace(slash, QLatin1Char('/') + joiner).replace(dash, QStringLiteral("–") + joiner);
+}
 
 }  // namespace
 
@@ -61,14 +72,15 @@ double lineHeight(const TextStyle& style) {
 QStringList wrapped(const QString& text, double width, const TextStyle& style) {
   QStringList lines;
   for (const QString& paragraph : text.split(QLatin1Char('\n'))) {
-    QTextLayout layout(paragraph, designFont(style));
+    const QString joined = unbroken(paragraph);
+    QTextLayout layout(joined, designFont(style));
     QTextOption option;
     option.setWrapMode(QTextOption::WrapAtWordBoundaryOrAnywhere);
     layout.setTextOption(option);
     layout.beginLayout();
     for (QTextLine line = layout.createLine(); line.isValid(); line = layout.createLine()) {
       line.setLineWidth(std::max(width, style.size) / perDesign(style));
-      lines << paragraph.mid(line.textStart(), line.textLength()).trimmed();
+      lines << joined.mid(line.textStart(), line.textLength()).remove(wordJoiner).trimmed();
     }
     layout.endLayout();
     if (paragraph.isEmpty()) lines << QString();

@@ -56,7 +56,7 @@ Row rowOf(const CheckVerdict& check, Finality finality, double width) {
   const double room = width - barWidth - markWidth - 2 * gap;
   QString title = text.title;
   if (check.verdict != VerdictWord::Pass || shownVerdict(check, finality) != check.verdict) {
-    title += QStringLiteral(" – ") + shownVerdictName(check, finality);
+    title += QStringLiteral(" –\u00A0") + shownVerdictName(check, finality);
   }
   return {check,
           shownVerdict(check, finality),

@@ -60,7 +60,7 @@ Texts textsOf(const CheckVerdict& check, Finality finality) {
 }
 
 // Widest a column may get before its texts wrap; the first takes what is left.
-constexpr std::array<double, Columns> mostWidth = {0, 25, 26, 31, 10, 19, 19, 26};
+constexpr std::array<double, Columns> mostWidth = {0, 25, 26, 31, 10, 19, 19, 17};
 
 // Columns as wide as their widest text; a column without any text is left out.
 Frame frameOf(const Verdict& verdict, Finality finality, double width) {

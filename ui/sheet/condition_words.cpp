@@ -89,8 +89,8 @@ QString gasText(const Gas& gas) {
     return why.isEmpty() ? Sheet::tr("gas force not determined")
                          : Sheet::tr("gas force not determined: %1").arg(why);
   }
-  const QString method = gas.method == "hold" ? Sheet::tr("from a hold")
-                                              : Sheet::tr("from the slow block, at mid-stroke");
+  const QString method =
+      gas.method == "hold" ? Sheet::tr("from a hold") : Sheet::tr("from the slow block");
   return Sheet::tr("gas force %1 %2").arg(quantityText(*gas.force, Quantity::Force), method);
 }
 

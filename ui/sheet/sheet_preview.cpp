@@ -24,6 +24,7 @@ namespace dampwright {
 
 namespace {
 
+constexpr int controlHeight = 32;  // px
 const QString paperKey = QStringLiteral("sheet/paper");
 const QString folderKey = QStringLiteral("sheet/folder");
 
@@ -37,7 +38,7 @@ PaperSize keptPaper() {
 QPushButton* button(const QString& text, const QString& tip) {
   auto* made = new QPushButton(text);
   made->setToolTip(tip);
-  made->setMinimumHeight(32);
+  made->setMinimumHeight(controlHeight);
   made->setAutoDefault(false);
   return made;
 }
@@ -78,6 +79,11 @@ QWidget* SheetPreview::makeBar() {
   address_ = new QLineEdit(content_.workshop.address);
   address_->setPlaceholderText(tr("Address"));
   address_->setAccessibleName(tr("Address of the workshop"));
+  for (QWidget* field : {static_cast<QWidget*>(paper_),
+                         static_cast<QWidget*>(workshop_),
+                         static_cast<QWidget*>(address_)}) {
+    field->setMinimumHeight(controlHeight);
+  }
   auto* save = button(tr("&Save PDF…"), tr("Save the sheet with its recordings inside"));
   auto* printButton = button(tr("&Print…"), tr("Print the sheet"));
   connect(paper_, &QComboBox::activated, this, [this] {

@@ -59,6 +59,18 @@ TEST_F(Type, NumberAndUnitStayOnOneLine) {
   EXPECT_EQ(wrapped(QStringLiteral("measured ") + value, width, style).at(1), value);
 }
 
+TEST_F(Type, NoLineEndsInsideAUnitOrARange) {
+  const TextStyle style{3, false, Qt::black};
+  const QString text = QStringLiteral("Rebound at 300\u00A0mm/s of 870–1120\u00A0N –\u00A0Fail");
+  for (double width = 25; width < 70; width += 0.5) {
+    for (const QString& line : wrapped(text, width, style)) {
+      EXPECT_FALSE(line.endsWith(QLatin1Char('/'))) << width;
+      EXPECT_FALSE(line.endsWith(QStringLiteral("–"))) << width;
+      EXPECT_LE(textWidth(line, style), width);
+    }
+  }
+}
+
 TEST_F(Type, ElidedTextFits) {
   const TextStyle style{3, false, Qt::black};
   const QString text(80, QLatin1Char('m'));
