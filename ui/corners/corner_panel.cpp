@@ -9,6 +9,7 @@
 
 #include "ui/corners/phase_card.h"
 #include "ui/corners/vehicle_view.h"
+#include "ui/look/elided.h"
 #include "ui/look/type.h"
 
 namespace dampwright {
@@ -16,8 +17,8 @@ namespace dampwright {
 CornerPanel::CornerPanel(QWidget* parent)
     : QFrame(parent),
       vehicle_(new VehicleView),
-      heading_(new QLabel),
-      damper_(new QPushButton(tr("Damper …"))),
+      heading_(new ElidedLabel(Qt::ElideMiddle)),
+      damper_(new QPushButton(tr("Damper…"))),
       add_(new QPushButton(tr("Drop run files here,\nor press to choose them"))) {
   setObjectName(QStringLiteral("card"));
   setFixedWidth(268);
@@ -41,7 +42,9 @@ CornerPanel::CornerPanel(QWidget* parent)
   scroll->setWidget(runs);
 
   auto* row = new QHBoxLayout;
-  row->addWidget(heading_, 1);
+  auto* runsLabel = new QLabel(tr("Runs"));
+  runsLabel->setObjectName(QStringLiteral("quiet"));
+  row->addWidget(runsLabel, 1);
   row->addWidget(damper_);
   auto* column = new QVBoxLayout(this);
   column->setContentsMargins(16, 12, 16, 16);
@@ -49,6 +52,7 @@ CornerPanel::CornerPanel(QWidget* parent)
   column->addWidget(title);
   column->addWidget(vehicle_);
   column->addSpacing(4);
+  column->addWidget(heading_);
   column->addLayout(row);
   column->addWidget(scroll, 1);
   column->addWidget(add_);
@@ -67,7 +71,10 @@ CornerPanel::CornerPanel(QWidget* parent)
 void CornerPanel::setView(const CornersView& view) {
   view_ = view;
   vehicle_->setView(view);
-  showHeading();
+  const bool selected = view.find(view.selected.corner) != nullptr;
+  heading_->setWhole(selectedHeading());
+  damper_->setEnabled(selected);
+  add_->setEnabled(selected);
   showPhases(view.find(view.selected.corner));
 }
 
@@ -76,23 +83,6 @@ QString CornerPanel::selectedHeading() const {
   if (corner == nullptr) return tr("No corner selected");
   return corner->serial.isEmpty() ? corner->name
                                   : corner->name + QStringLiteral(" · ") + corner->serial;
-}
-
-void CornerPanel::showHeading() {
-  const bool selected = view_.find(view_.selected.corner) != nullptr;
-  damper_->setVisible(selected);
-  add_->setEnabled(selected);
-  // 236 less the button and a gap: long serials are elided and stand whole in the tooltip.
-  const int room = width() - 32 - (selected ? damper_->sizeHint().width() + 8 : 0);
-  const QString text = selectedHeading();
-  heading_->setText(QFontMetrics(heading_->font()).elidedText(text, Qt::ElideMiddle, room));
-  heading_->setToolTip(text);
-  heading_->setAccessibleName(text);
-}
-
-void CornerPanel::resizeEvent(QResizeEvent* event) {
-  QFrame::resizeEvent(event);
-  showHeading();
 }
 
 void CornerPanel::showPhases(const CornerView* corner) {

@@ -5,12 +5,12 @@
 
 #include "ui/corners/corner_view.h"
 
-class QLabel;
 class QPushButton;
 class QVBoxLayout;
 
 namespace dampwright {
 
+class ElidedLabel;
 class PhaseCard;
 class VehicleView;
 
@@ -33,17 +33,13 @@ class CornerPanel : public QFrame {
   void removeWanted(const dampwright::PhaseKey& key, int run);
   void moveWanted(const dampwright::PhaseKey& from, const QString& toCorner);
 
- protected:
-  void resizeEvent(QResizeEvent* event) override;
-
  private:
   void showPhases(const CornerView* corner);
   void addPhaseCard(int phase);
-  void showHeading();
 
   CornersView view_;
   VehicleView* vehicle_;
-  QLabel* heading_;
+  ElidedLabel* heading_;
   QPushButton *damper_, *add_;
   QVBoxLayout* list_;
   std::vector<PhaseCard*> cards_;

@@ -29,10 +29,11 @@ CornerPlace::CornerPlace(QWidget* parent) : QAbstractButton(parent) {
 void CornerPlace::setView(const CornerView& view, bool selected) {
   view_ = view;
   setChecked(selected);
-  const QString verdict = view.busy      ? tr("being measured")
-                          : view.broken  ? tr("not readable")
-                          : view.verdict ? verdictName(*view.verdict)
-                                         : tr("no run yet");
+  const QString verdict = view.busy             ? tr("being measured")
+                          : view.broken         ? tr("not readable")
+                          : view.verdict        ? verdictName(*view.verdict)
+                          : view.phases.empty() ? tr("no run yet")
+                                                : tr("no verdict yet");
   setText(view.name);
   setAccessibleName(QStringList{view.name, view.serial, verdict}.join(QStringLiteral(", ")));
   setAccessibleDescription(tr("Select to see its loops; drop run files here."));
@@ -79,14 +80,15 @@ void CornerPlace::paintState(QPainter& painter, const QRectF& box) const {
     painter.fillRect(rail, colours.hairline);
     painter.fillRect({rail.topLeft(), QSizeF(rail.width() * view_.progress, rail.height())},
                      colours.action);
-    drawText(painter, box.adjusted(0, 0, 0, -8), tr("measuring …"), quiet);
+    drawText(painter, box.adjusted(0, 0, 0, -8), tr("measuring…"), quiet);
   } else if (view_.phases.empty()) {
     drawText(painter, box, tr("no run yet"), quiet);
   } else if (view_.broken) {
     drawText(painter, box, tr("not readable"), {11, true, colours.evidence});
+  } else if (view_.verdict) {
+    paintStamp(painter, box, *view_.verdict, verdictName(*view_.verdict), colours);
   } else {
-    const VerdictWord word = view_.verdict.value_or(VerdictWord::NotTested);
-    paintStamp(painter, box, word, verdictName(word), colours);
+    drawText(painter, box, tr("no verdict yet"), quiet);
   }
 }
 

@@ -184,9 +184,9 @@ void LoopPlot::drawLabels() {
   if (!figure_.gasLine.empty()) {
     // Loops leave the corners of their plot empty; beside the line there is no room for words.
     QCPItemPosition* corner =
-        addLabel(tr("dashed: gas force"), Qt::AlignRight | Qt::AlignTop)->position;
+        addLabel(tr("dashed: gas force"), Qt::AlignRight | Qt::AlignBottom)->position;
     corner->setType(QCPItemPosition::ptAxisRectRatio);
-    corner->setCoords(1, 0);
+    corner->setCoords(1, 1);
   }
   constexpr double gapShare = 0.05;  // of the axis: about a line of text
   for (const LoopLabel& speed : speedLabels(figure_, gapShare * (force_.high - force_.low)))

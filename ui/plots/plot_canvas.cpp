@@ -32,7 +32,6 @@ PlotCanvas::PlotCanvas(QWidget* parent) : QCustomPlot(parent) {
   addLayer(QStringLiteral("pointing"), layer(QStringLiteral("main")), limAbove);
   overlay_ = layer(QStringLiteral("pointing"));
   overlay_->setMode(QCPLayer::lmBuffered);
-  setPlottingHint(QCP::phFastPolylines);  // pens of 2 px would take 40 times as long
   setInteractions(QCP::iRangeDrag | QCP::iRangeZoom);
   hover_.setSingleShot(true);
   hover_.setInterval(frameMs);
@@ -69,7 +68,11 @@ void PlotCanvas::changeEvent(QEvent* event) {
 void PlotCanvas::setEmptyText(const QString& text) {
   if (emptyText_ == text) return;
   emptyText_ = text;
-  update();
+  for (QCPAxisRect* rect : axisRects()) {
+    for (const auto side : {QCPAxis::atBottom, QCPAxis::atLeft})
+      rect->axis(side)->setVisible(text.isEmpty());
+  }
+  replot(rpQueuedReplot);
 }
 
 void PlotCanvas::mouseMoveEvent(QMouseEvent* event) {

@@ -38,7 +38,7 @@ QTreeWidgetItem* rowOf(const JobSummary& job) {
 
 StartPage::StartPage(QWidget* parent)
     : QWidget(parent),
-      newJob_(new QPushButton(tr("&New job …"))),
+      newJob_(new QPushButton(tr("&New job…"))),
       demonstration_(new QPushButton(tr("Open the &demonstration"))),
       open_(new QPushButton(tr("&Open job"))),
       recent_(new QTreeWidget),
@@ -97,6 +97,7 @@ QWidget* StartPage::choice(QPushButton* button, const QString& text) {
   card->setObjectName(QStringLiteral("card"));
   auto* label = new QLabel(text);
   label->setWordWrap(true);
+  card->setSizePolicy(QSizePolicy::Preferred, QSizePolicy::Maximum);
   button->setMinimumHeight(44);
   auto* column = new QVBoxLayout(card);
   column->setContentsMargins(16, 16, 16, 16);

@@ -35,7 +35,7 @@ class CheckDelegate : public QStyledItemDelegate {
     painter->setRenderHint(QPainter::Antialiasing);
     const bool selected = option.state & QStyle::State_Selected;
     painter->fillRect(box, selected ? colours.selected : colours.card);
-    painter->fillRect(QRectF(box.left(), box.bottom(), box.width(), 1), colours.hairline);
+    painter->fillRect(QRectF(box.left(), box.bottom() - 1, box.width(), 1), colours.hairline);
     if (index.column() == ChecksModel::Asked) paintWords(*painter, box, check, colours);
     if (index.column() == ChecksModel::Margin)
       paintMarginBar(

@@ -6,12 +6,14 @@
 #include <QPushButton>
 #include <QVBoxLayout>
 
+#include "ui/look/elided.h"
+
 namespace dampwright {
 
 namespace {
 
 QLabel* sentence(const QString& text) {
-  auto* label = new QLabel(text);
+  auto* label = new QLabel(breakable(text));
   label->setTextFormat(Qt::PlainText);  // a file's words are never markup
   label->setWordWrap(true);
   label->setTextInteractionFlags(Qt::TextSelectableByMouse);

@@ -1,13 +1,13 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/verdict/verdict_panel.h"
 
-#include <QComboBox>
 #include <QHBoxLayout>
 #include <QLabel>
 #include <QPushButton>
 #include <QVBoxLayout>
 #include <algorithm>
 
+#include "ui/look/elided.h"
 #include "ui/look/type.h"
 #include "ui/text/names.h"
 #include "ui/text/numbers.h"
@@ -19,8 +19,8 @@ namespace dampwright {
 
 namespace {
 
-QLabel* quietLabel() {
-  auto* label = new QLabel;
+template <class Label>
+Label* quiet(Label* label) {
   label->setObjectName(QStringLiteral("quiet"));
   label->setFont(screenFont(TextSize::Quiet));
   return label;
@@ -43,20 +43,18 @@ QString limitsName(const Limits& limits) {
 VerdictPanel::VerdictPanel(QWidget* parent)
     : QFrame(parent),
       stamp_(new StampBanner),
-      damper_(quietLabel()),
+      damper_(quiet(new ElidedLabel(Qt::ElideMiddle))),
       line_(new QLabel),
-      rule_(quietLabel()),
+      rule_(quiet(new QLabel)),
       checksHeading_(heading(tr("Checks"))),
       notesHeading_(heading(tr("Remarks"))),
-      limits_(new QComboBox),
+      limits_(new ElidedComboBox),
       checks_(new ChecksTable),
       notices_(new NoticeList),
-      sheet_(new QPushButton(tr("Print sheet …"))) {
+      sheet_(new QPushButton(tr("Print sheet…"))) {
   setObjectName(QStringLiteral("card"));
   setFixedWidth(332);
   line_->setWordWrap(true);
-  limits_->setSizeAdjustPolicy(QComboBox::AdjustToMinimumContentsLengthWithIcon);
-  limits_->setMinimumContentsLength(10);
   limits_->setAccessibleName(tr("Limits"));
   sheet_->setObjectName(QStringLiteral("primary"));
   sheet_->setMinimumHeight(40);
@@ -94,15 +92,14 @@ void VerdictPanel::buildColumn() {
 void VerdictPanel::setView(const VerdictView& view) {
   view_ = view;
   stamp_->setWord(view.word());
-  damper_->setText(QFontMetrics(damper_->font()).elidedText(view.damper, Qt::ElideMiddle, 298));
-  damper_->setToolTip(view.damper);
+  damper_->setWhole(view.damper);
   line_->setText(verdictLine(view));
   checks_->setVerdict(view.verdict);
   const bool judged = view.verdict && !view.verdict->checks.empty();
   checks_->setVisible(judged);
   checksHeading_->setVisible(judged);
   showNotices();
-  sheet_->setEnabled(view.hasJob && view.measured);
+  sheet_->setEnabled(view.printable);
   showRule();
   showLimits();
 }
@@ -140,7 +137,7 @@ void VerdictPanel::showRule() {
 }
 
 void VerdictPanel::showLimits() {
-  const QSignalBlocker quiet(limits_);
+  const QSignalBlocker blocker(limits_);
   limits_->clear();
   int current = -1;
   for (const Limits& limits : view_.known) {
@@ -152,7 +149,7 @@ void VerdictPanel::showLimits() {
     limits_->insertItem(0, limitsName(*view_.chosen));
     view_.known.insert(view_.known.begin(), *view_.chosen);
   }
-  limits_->addItem(tr("From file …"));
+  limits_->addItem(tr("From file…"));
   limits_->setPlaceholderText(tr("Choose limits"));
   limits_->setCurrentIndex(current);
   limits_->setToolTip(limits_->currentText());

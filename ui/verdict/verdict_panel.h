@@ -5,13 +5,14 @@
 #include "core/base/direction.h"
 #include "ui/verdict/verdict_view.h"
 
-class QComboBox;
 class QLabel;
 class QPushButton;
 
 namespace dampwright {
 
 class ChecksTable;
+class ElidedComboBox;
+class ElidedLabel;
 class NoticeList;
 class StampBanner;
 
@@ -44,8 +45,9 @@ class VerdictPanel : public QFrame {
   VerdictView view_;
   std::vector<NoticeView> dismissed_;
   StampBanner* stamp_;
-  QLabel *damper_, *line_, *rule_, *checksHeading_, *notesHeading_;
-  QComboBox* limits_;
+  ElidedLabel* damper_;
+  QLabel *line_, *rule_, *checksHeading_, *notesHeading_;
+  ElidedComboBox* limits_;
   ChecksTable* checks_;
   NoticeList* notices_;
   QPushButton* sheet_;

@@ -47,7 +47,7 @@ void addProblems(VerdictView& view, const Session& session) {
         {problems[i].file,
          sentenceText(error),
          {},
-         true,
+         !problems[i].taken,
          NoticeAction::Dismiss,
          static_cast<int>(i)});
   }
@@ -113,6 +113,8 @@ VerdictView verdictView(const Session& session) {
   view.chosen = session.job().limits;
   view.busy = state.busy;
   view.measured = state.measured != nullptr;
+  view.broken = state.problem.has_value();
+  for (const JobItem& item : session.job().items) view.printable |= !item.phases.empty();
   view.verdict = state.verdict;
   if (state.problem)
     add(view.notices, {{}, sentenceText(*state.problem), {}, true, NoticeAction::None, 0});
@@ -123,6 +125,7 @@ VerdictView verdictView(const Session& session) {
 
 QString verdictLine(const VerdictView& view) {
   if (view.busy && !view.measured) return Panel::tr("The run is being measured.");
+  if (view.broken) return Panel::tr("This run could not be measured.");
   if (!view.measured) return Panel::tr("No run yet.");
   if (!view.chosen) return Panel::tr("Choose limits to get a verdict.");
   return view.verdict ? verdictSummary(*view.verdict) : QString();

@@ -30,8 +30,9 @@ struct NoticeView {
 /// Everything that the verdict part shows of the selected damper.
 struct VerdictView {
   bool hasJob = false;
-  QString damper;  ///< "Rear left · DA-1109"
-  bool busy = false, measured = false;
+  QString damper;                                       ///< "Rear left · DA-1109"
+  bool busy = false, measured = false, broken = false;  ///< broken: it could not be measured
+  bool printable = false;                               ///< the job has something to print
   std::optional<Verdict> verdict;
   std::optional<Limits> chosen;  ///< of the job
   std::vector<Limits> known;

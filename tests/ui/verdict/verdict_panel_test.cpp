@@ -70,7 +70,7 @@ TEST_F(VerdictPanelTest, StampChecksAndSheetStayInViewOnASmallScreen) {
   panel.resize(332, 640);
   QTest::qWait(20);
   EXPECT_LE(panel.height(), 640);
-  const QWidget* sheet = button(QString::fromUtf8("Print sheet …"));
+  const QWidget* sheet = button(QString::fromUtf8("Print sheet…"));
   ASSERT_NE(sheet, nullptr);
   EXPECT_TRUE(panel.rect().contains(sheet->geometry()));
   const auto* checks = panel.findChild<ChecksTable*>();
@@ -147,7 +147,11 @@ TEST_F(VerdictPanelTest, WithoutARunItSaysWhatIsMissing) {
   view.verdict.reset();
   panel.setView(view);
   EXPECT_TRUE(everythingSaid().contains("No run yet"));
-  EXPECT_FALSE(button(QString::fromUtf8("Print sheet …"))->isEnabled());
+  EXPECT_FALSE(button(QString::fromUtf8("Print sheet…"))->isEnabled());
+  view.broken = true;
+  panel.setView(view);
+  EXPECT_TRUE(everythingSaid().contains("could not be measured"));
+  view.broken = false;
   view.measured = true;
   view.chosen.reset();
   panel.setView(view);
