@@ -70,6 +70,7 @@ void MainWindow::build() {
   trouble_->hide();
   promise_->setObjectName(QStringLiteral("promise"));
   promise_->hide();
+  pages_->addWidget(new QWidget);  // until the book is read nobody knows what stands here
   pages_->addWidget(startPage_);
   pages_->addWidget(jobPage_);
   auto* middle = new QWidget;
@@ -141,7 +142,10 @@ void MainWindow::connectSession() {
   connect(&session_, &Session::selectionChanged, this, &MainWindow::refresh);
   connect(&session_, &Session::stateChanged, this, &MainWindow::refresh);
   connect(&session_, &Session::recentJobsChanged, this, &MainWindow::refresh);
-  connect(&session_, &Session::bookRead, this, &MainWindow::refresh);
+  connect(&session_, &Session::bookRead, this, [this] {
+    refresh();
+    if (!session_.hasJob()) pages_->setCurrentWidget(startPage_);
+  });
   connect(&session_, &Session::bookTrouble, this, [this](const QString& sentence) {
     trouble_->setText(sentence);
     trouble_->setVisible(!sentence.isEmpty());
