@@ -30,7 +30,9 @@ Connection::Connection(QString name, QString file)
     : name_(std::move(name)), file_(std::move(file)), words_(sqliteWords()) {}
 
 Connection::Connection(Connection&& other) noexcept
-    : name_(std::exchange(other.name_, {})), file_(other.file_), words_(other.words_) {}
+    : name_(std::exchange(other.name_, {})),
+      file_(std::move(other.file_)),
+      words_(std::move(other.words_)) {}
 
 Connection::~Connection() {
   if (name_.isEmpty()) return;

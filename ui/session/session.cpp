@@ -33,7 +33,10 @@ Session::Session(const QString& bookFile, const QString& sampleRuns, QObject* pa
   readContents();
 }
 
-Session::~Session() { stopWork(); }
+Session::~Session() {
+  blockSignals(true);  // who listens may be half gone
+  stopWork();
+}
 
 void Session::readContents() {
   keeper_.read([](const Book& book) { return contentsOf(book); },

@@ -108,6 +108,7 @@ class Session : public QObject {
   std::vector<RunBytes> unstored(const Job& job) const;
   void writeJob(const Job& job, const QString& what);
   void takeDrop(std::vector<DroppedItem> items, const QString& corner);
+  static void refuseJobItems(std::vector<DroppedItem>& items);
   void takeRuns(std::vector<DroppedRun> runs, const QString& corner);
   void takeCard(const DamperCard& card, const QString& corner);
   void takeLimits(const Limits& limits);

@@ -18,11 +18,24 @@ void Session::dropFiles(const QStringList& paths, const QString& corner) {
   }
   intake_.add([task = DropTask{paths, desk_.profiles(), bookFile_}](
                   const Progress& progress) { return readDrop(task, progress); },
-              [this, corner](std::vector<DroppedItem> items) {
+              [this, corner, job = number_](std::vector<DroppedItem> items) {
                 --drops_;
+                if (job && job != number_) refuseJobItems(items);
                 takeDrop(std::move(items), corner);
                 settle();
               });
+}
+
+// What was dropped on one job must not land in another that was opened meanwhile.
+void Session::refuseJobItems(std::vector<DroppedItem>& items) {
+  for (DroppedItem& item : items) {
+    std::string file;
+    if (const auto* run = std::get_if<DroppedRun>(&item)) file = run->bytes.name;
+    if (const auto* card = std::get_if<DamperCard>(&item)) file = card->serial;
+    if (const auto* limits = std::get_if<Limits>(&item)) file = limits->title;
+    if (file.empty()) continue;
+    item = DropProblem{QString::fromStdString(file), {"job-was-left", {}, {file}}};
+  }
 }
 
 // Documents first: a rig profile, a job or a card of the same drop counts for its runs.

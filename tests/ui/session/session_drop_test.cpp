@@ -99,6 +99,15 @@ TEST_F(ASession, GoodFilesOfADropAreTakenBesideBadOnes) {
   EXPECT_TRUE(session->state({"front left", 0}).measured);
 }
 
+TEST_F(ASession, WhatWasDroppedOnOneJobDoesNotLandInAnother) {
+  startCar();
+  session->dropFiles({sample("car_front_left.csv")}, "front left");
+  session->startJob({});
+  settle();
+  EXPECT_THAT(problems(), ElementsAre("job-was-left"));
+  EXPECT_THAT(session->job().items[0].phases, IsEmpty());
+}
+
 TEST_F(ASession, ALimitSheetIsStoredAndChosen) {
   startCar();
   drop({sample("limits_car.json")});
