@@ -10,35 +10,73 @@ namespace {
 
 // A migration is never changed once it was released; what comes later is a new one behind it.
 // {bytes} and {row number} are the engine's words. Dates are ISO 8601 text, flags are 0 and 1.
+const QStringList version1 = {
+    R"(CREATE TABLE jobs (
+            number TEXT PRIMARY KEY,
+            customer TEXT NOT NULL,
+            vehicle TEXT NOT NULL,
+            plate TEXT NOT NULL,
+            technician TEXT NOT NULL,
+            opened TEXT NOT NULL,
+            changed TEXT NOT NULL,
+            invented INTEGER NOT NULL,
+            verdict TEXT,
+            document TEXT NOT NULL))",
+    "CREATE INDEX jobs_by_change ON jobs (changed)",
+    R"(CREATE TABLE job_dampers (
+            job TEXT NOT NULL REFERENCES jobs (number),
+            corner TEXT NOT NULL,
+            serial TEXT NOT NULL,
+            serial_folded TEXT NOT NULL,
+            part_number TEXT NOT NULL,
+            document TEXT NOT NULL,
+            PRIMARY KEY (job, corner)))",
+    "CREATE INDEX job_dampers_by_serial ON job_dampers (serial_folded)",
+    R"(CREATE TABLE run_files (
+            sha256 TEXT PRIMARY KEY,
+            name TEXT NOT NULL,
+            bytes BIGINT NOT NULL,
+            chunks INTEGER NOT NULL,
+            stored TEXT NOT NULL))",
+    R"(CREATE TABLE run_file_chunks (
+            sha256 TEXT NOT NULL REFERENCES run_files (sha256),
+            number INTEGER NOT NULL,
+            data {bytes} NOT NULL,
+            PRIMARY KEY (sha256, number)))",
+    R"(CREATE TABLE job_runs (
+            job TEXT NOT NULL REFERENCES jobs (number),
+            corner TEXT NOT NULL,
+            phase INTEGER NOT NULL,
+            run INTEGER NOT NULL,
+            sha256 TEXT NOT NULL REFERENCES run_files (sha256),
+            PRIMARY KEY (job, corner, phase, run)))",
+    "CREATE INDEX job_runs_by_file ON job_runs (sha256)",
+    R"(CREATE TABLE rig_profiles (
+            name TEXT PRIMARY KEY,
+            signature TEXT NOT NULL,
+            changed TEXT NOT NULL,
+            document TEXT NOT NULL))",
+    "CREATE INDEX rig_profiles_by_signature ON rig_profiles (signature)",
+    R"(CREATE TABLE limit_sheets (
+            title TEXT NOT NULL,
+            revision TEXT NOT NULL,
+            source TEXT NOT NULL,
+            added TEXT NOT NULL,
+            document TEXT NOT NULL,
+            PRIMARY KEY (title, revision)))",
+    "CREATE TABLE settings (name TEXT PRIMARY KEY, value TEXT NOT NULL)",
+    R"(CREATE TABLE journal (
+            entry {row number},
+            at TEXT NOT NULL,
+            program TEXT NOT NULL,
+            subject TEXT NOT NULL,
+            key TEXT NOT NULL,
+            what TEXT NOT NULL,
+            document TEXT NOT NULL))",
+    "CREATE INDEX journal_by_subject ON journal (subject, key)"};
+
 const std::vector<QStringList>& migrations() {
-  static const std::vector<QStringList> list = {
-      // 1
-      {"CREATE TABLE jobs (number TEXT PRIMARY KEY, customer TEXT NOT NULL, vehicle TEXT NOT NULL, "
-       "plate TEXT NOT NULL, technician TEXT NOT NULL, opened TEXT NOT NULL, changed TEXT NOT "
-       "NULL, invented INTEGER NOT NULL, verdict TEXT, document TEXT NOT NULL)",
-       "CREATE INDEX jobs_by_change ON jobs (changed)",
-       "CREATE TABLE job_dampers (job TEXT NOT NULL REFERENCES jobs (number), corner TEXT NOT "
-       "NULL, serial TEXT NOT NULL, serial_folded TEXT NOT NULL, part_number TEXT NOT NULL, "
-       "document TEXT NOT NULL, PRIMARY KEY (job, corner))",
-       "CREATE INDEX job_dampers_by_serial ON job_dampers (serial_folded)",
-       "CREATE TABLE run_files (sha256 TEXT PRIMARY KEY, name TEXT NOT NULL, bytes BIGINT NOT "
-       "NULL, chunks INTEGER NOT NULL, stored TEXT NOT NULL)",
-       "CREATE TABLE run_file_chunks (sha256 TEXT NOT NULL REFERENCES run_files (sha256), number "
-       "INTEGER NOT NULL, data {bytes} NOT NULL, PRIMARY KEY (sha256, number))",
-       "CREATE TABLE job_runs (job TEXT NOT NULL REFERENCES jobs (number), corner TEXT NOT NULL, "
-       "phase INTEGER NOT NULL, run INTEGER NOT NULL, sha256 TEXT NOT NULL REFERENCES run_files "
-       "(sha256), PRIMARY KEY (job, corner, phase, run))",
-       "CREATE INDEX job_runs_by_file ON job_runs (sha256)",
-       "CREATE TABLE rig_profiles (name TEXT PRIMARY KEY, signature TEXT NOT NULL, changed TEXT "
-       "NOT NULL, document TEXT NOT NULL)",
-       "CREATE INDEX rig_profiles_by_signature ON rig_profiles (signature)",
-       "CREATE TABLE limit_sheets (title TEXT NOT NULL, revision TEXT NOT NULL, source TEXT NOT "
-       "NULL, added TEXT NOT NULL, document TEXT NOT NULL, PRIMARY KEY (title, revision))",
-       "CREATE TABLE settings (name TEXT PRIMARY KEY, value TEXT NOT NULL)",
-       "CREATE TABLE journal (entry {row number}, at TEXT NOT NULL, program TEXT NOT NULL, "
-       "subject TEXT NOT NULL, key TEXT NOT NULL, what TEXT NOT NULL, document TEXT NOT NULL)",
-       "CREATE INDEX journal_by_subject ON journal (subject, key)"},
-  };
+  static const std::vector<QStringList> list = {version1};
   return list;
 }
 
