@@ -9,6 +9,7 @@ double FittedLaw::at(double velocity) const {
   const Law* form = findLaw(law);
   if (form == nullptr || parameters.size() != form->parameters.size()) return 0;
   std::vector<double> values;
+  values.reserve(parameters.size());
   for (const FittedParameter& parameter : parameters) values.push_back(parameter.value);
   return form->force(values, velocity);
 }

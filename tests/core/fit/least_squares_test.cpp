@@ -163,6 +163,30 @@ TEST(FitLeastSquares, FewerPointsThanParametersIsRankDeficient) {
   EXPECT_EQ(found.status, FitStatus::RankDeficient);
 }
 
+TEST(UnscaledCovariance, IsTheInverseOfTheNormalMatrixOrNothing) {
+  const Decay decay;
+  const MatrixXd jacobian = decay.problem().jacobian(VectorXd{{2, 1, 0}});
+  const auto covariance = unscaledCovariance(jacobian);
+  ASSERT_TRUE(covariance);
+  const MatrixXd one = *covariance * (jacobian.transpose() * jacobian);
+  EXPECT_TRUE(one.isApprox(MatrixXd::Identity(3, 3), 1e-10));
+  MatrixXd alike = jacobian;
+  alike.col(2) = 3 * alike.col(0);
+  EXPECT_FALSE(unscaledCovariance(alike));
+}
+
+TEST(FitLeastSquares, AFixedParameterStaysAndTheOthersAreFitted) {
+  const Decay decay;
+  LeastSquaresProblem problem = decay.problem();
+  problem.lower = VectorXd{{-infinite, -infinite, 0.5}};
+  problem.upper = VectorXd{{infinite, infinite, 0.5}};
+  const FitSummary found = fitLeastSquares(problem, VectorXd{{1, 1, 0.5}});
+  EXPECT_EQ(found.status, FitStatus::AtBound);
+  EXPECT_EQ(found.parameters[2], 0.5);
+  EXPECT_EQ(found.dof, 38);
+  EXPECT_NEAR(found.parameters[0], 2.5, 5 * found.standardErrors[0]);
+}
+
 TEST(FitLeastSquares, TooFewStepsIsNotConverged) {
   const Decay decay;
   const FitSummary found =
