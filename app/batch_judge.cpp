@@ -1,4 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include <array>
+#include <fstream>
+
 #include "app/batch_files.h"
 #include "app/batch_verbs.h"
 #include "core/base/sha256.h"
@@ -14,19 +17,24 @@ struct Stored {
   std::string sha256;
 };
 
-bool looksLikeDocument(std::string_view bytes) {
-  if (bytes.starts_with("\xEF\xBB\xBF")) bytes.remove_prefix(3);
-  const auto first = bytes.find_first_not_of(" \t\r\n");
-  return first != std::string_view::npos && bytes[first] == '{';
+// Whether a file begins as JSON does. Only its beginning is read: it may be a run of a gigabyte.
+bool looksLikeDocument(const std::string& path) {
+  std::array<char, 64> start{};
+  std::ifstream stream(path, std::ios::binary);
+  stream.read(start.data(), start.size());
+  std::string_view text(start.data(), static_cast<std::size_t>(stream.gcount()));
+  if (text.starts_with("\xEF\xBB\xBF")) text.remove_prefix(3);
+  const auto first = text.find_first_not_of(" \t\r\n");
+  return first != std::string_view::npos && text[first] == '{';
 }
 
 // The stored measurement where the only file is one; nothing where it is a run.
 Result<std::optional<Stored>> storedMeasurement(const BatchRequest& request) {
   if (request.files.size() != 1 || request.files.front() == "-") return std::optional<Stored>();
   const std::string& path = request.files.front();
+  if (!looksLikeDocument(path)) return std::optional<Stored>();
   const auto bytes = loadInput(path);
   if (!bytes) return bytes.error();
-  if (!looksLikeDocument(bytes.value())) return std::optional<Stored>();
   auto measurement = readMeasurement(bytes.value(), path);
   if (!measurement) return measurement.error();
   return std::optional<Stored>(Stored{std::move(measurement).value(), sha256Hex(bytes.value())});

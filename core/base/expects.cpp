@@ -8,11 +8,11 @@ namespace dampwright {
 
 void expects(bool condition, std::source_location where) {
   if (condition) return;
-  std::fprintf(stderr,
-               "dampwright: broken promise at %s:%u in %s\n",
-               where.file_name(),
-               static_cast<unsigned>(where.line()),
-               where.function_name());
+  (void)std::fprintf(stderr,
+                     "dampwright: broken promise at %s:%u in %s\n",
+                     where.file_name(),
+                     static_cast<unsigned>(where.line()),
+                     where.function_name());
   std::abort();
 }
 

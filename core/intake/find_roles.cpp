@@ -121,7 +121,9 @@ class RoleFinder {
     for (const RoleRow& row : roleRows) {
       if (const auto error = takeOption(row)) return *error;
     }
-    for (const RoleRow& row : roleRows) takeRig(row);
+    for (const RoleRow& row : roleRows) {
+      if (const auto error = takeRig(row)) return *error;
+    }
     for (const RoleRow& row : roleRows) takeNamed(row);
     takeClockByShape();
     takeVelocityByShape();
@@ -156,17 +158,23 @@ class RoleFinder {
     return std::nullopt;
   }
 
-  void takeRig(const RoleRow& row) {
+  // Without its force or displacement column the profile is another rig's: its signs would be
+  // wrong.
+  std::optional<Error> takeRig(const RoleRow& row) {
     RoleChoice& choice = roles_.*row.choice;
-    if (choice.column || !rig_ || !((*rig_).*row.rig)) return;
+    if (choice.column || !rig_ || !((*rig_).*row.rig)) return std::nullopt;
     const RigColumn& known = *((*rig_).*row.rig);
     const auto column = columnOf(columns_, known);
-    if (!column || isText(columns_[*column]) || isTaken(*column)) {
-      const std::string name = known.name.empty() ? std::string(row.name) : known.name;
-      roles_.remarks.push_back(Remark{"rig-column-missing", Severity::Warning, {{"column", name}}});
-      return;
+    if (column && !isText(columns_[*column]) && !isTaken(*column)) {
+      choice = {column, "role-by-rig", known};
+      return std::nullopt;
     }
-    choice = {column, "role-by-rig", known};
+    const std::string name = known.name.empty() ? std::string(row.name) : known.name;
+    if (row.role == Role::Displacement || row.role == Role::Force) {
+      return Error{"rig-of-another-file", {{"column", name}, {"columns", listOf(columns_)}}, {}};
+    }
+    roles_.remarks.push_back(Remark{"rig-column-missing", Severity::Warning, {{"column", name}}});
+    return std::nullopt;
   }
 
   // The columns with the best evidence that name and unit give for a role.

@@ -2,12 +2,16 @@
 #include "core/intake/load_file.h"
 
 #include <algorithm>
+#include <array>
 #include <cerrno>
 #include <cstdio>
 #include <cstring>
 #include <memory>
 #include <new>
 #include <optional>
+#include <string_view>
+
+#include "core/intake/recognise_other.h"
 
 namespace dampwright {
 namespace {
@@ -42,6 +46,23 @@ std::optional<Error> notAnOrdinaryFile(const fs::path& path) {
   return std::nullopt;
 }
 
+// A gigabyte of no text is refused by its beginning, before room is made for it.
+std::optional<Error> noTextAtItsStart(std::FILE* file, const fs::path& path) {
+  std::array<char, 65536> start{};
+  const std::size_t got = std::fread(start.data(), 1, start.size(), file);
+  if (std::ferror(file) != 0) return systemError(errno, path);
+  const std::string_view text(start.data(), got);
+  std::optional<Error> other = recogniseOther(text);
+  if (text.find_first_not_of('\0') == std::string_view::npos)
+    other = Error{"file-is-binary", {}, {}};
+  if (other) {
+    other->place = placeOf(path);
+    return other;
+  }
+  std::rewind(file);
+  return std::nullopt;
+}
+
 Result<std::string> readToEnd(std::FILE* file, std::size_t expected, const fs::path& path) {
   constexpr std::size_t chunk = std::size_t{4} << 20;
   std::string bytes;
@@ -73,6 +94,10 @@ Result<std::string> loadFile(const fs::path& path) {
   }
   const OpenFile file(std::fopen(path.c_str(), "rb"));
   if (file == nullptr) return systemError(errno, path);
+  constexpr std::uintmax_t large = std::uintmax_t{16} << 20;
+  if (size > large) {
+    if (const auto refused = noTextAtItsStart(file.get(), path)) return *refused;
+  }
   try {
     return readToEnd(file.get(), static_cast<std::size_t>(size), path);
   } catch (const std::bad_alloc&) {

@@ -59,7 +59,7 @@ constexpr Sentence rows[] = {
      "In the block at {start} the damper gives energy instead of taking it.",
      "Check the sign of the force and the delay between the channels."},
     {"few-speeds",
-     "The damper was tested at {speeds} speeds only, so its curve between them is uncertain.",
+     "Speeds tested: {speeds} only, so the curve between them is uncertain.",
      "Test at five speeds or more."},
     {"mixed-strokes",
      "Blocks of different stroke were tested; their forces stand beside each other and are not "

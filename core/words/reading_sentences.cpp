@@ -85,6 +85,10 @@ constexpr Sentence rows[] = {
     {"truncated-last-row",
      "The last row ({first_row}) is cut short and was left out.",
      "If the rig was still writing, drop the file again when it is done."},
+    {"rig-of-another-file",
+     "The rig profile names a column {column} that this file does not have; the file has "
+     "{columns}.",
+     "Choose the profile of the rig that wrote this file, or name the columns."},
     {"rig-column-missing",
      "The rig profile names a column {column} that this file does not have.",
      "Look whether this is the right rig profile for the file."},

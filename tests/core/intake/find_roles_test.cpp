@@ -137,6 +137,17 @@ TEST(FindRoles, AProfileBeatsNames) {
   EXPECT_EQ(roles.remarks[0].code, "rig-column-missing");
 }
 
+// Its signs would be applied to columns that it does not know.
+TEST(FindRoles, AProfileWithoutItsForceColumnIsAnotherRigs) {
+  RigProfile rig;
+  rig.force = RigColumn{"gone", {}, ""};
+  const std::vector<ColumnFacts> columns = {column("Travel (mm)", made.displacement),
+                                            column("Load (N)", made.force)};
+  const auto roles = findRoles(columns, {}, rig);
+  ASSERT_FALSE(roles);
+  EXPECT_EQ(roles.error().code, "rig-of-another-file");
+}
+
 // Where nothing settles it.
 
 TEST(FindRoles, TwoForcesAreAsked) {

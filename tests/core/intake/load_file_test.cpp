@@ -79,5 +79,11 @@ TEST_F(LoadFile, RefusesMoreThanTwoGigabytesUnread) {
   EXPECT_EQ(codeOf(path), "file-too-large");
 }
 
+TEST_F(LoadFile, RefusesZerosByTheirBeginning) {
+  const fs::path path = write("zeros.csv", "");
+  fs::resize_file(path, static_cast<std::uintmax_t>(largestFile));  // takes no room on the disk
+  EXPECT_EQ(codeOf(path), "file-is-binary");
+}
+
 }  // namespace
 }  // namespace dampwright
