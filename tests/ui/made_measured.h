@@ -38,6 +38,7 @@ inline Reading readingAt(double speed, Direction direction) {
   reading.peakVelocity = speed;
   reading.force = sign * forceAt(sign * speed);
   reading.forceU = 4;
+  reading.forceTotalU = 4;
   reading.forceDof = 20;
   reading.dampingForce = reading.force - sign * gas;
   reading.largestForce = reading.force;

@@ -31,7 +31,9 @@ void ElidedLabel::resizeEvent(QResizeEvent* event) {
 }
 
 ElidedComboBox::ElidedComboBox(QWidget* parent) : QComboBox(parent) {
+  constexpr int fewestPixels = 96;
   setSizePolicy(QSizePolicy::Ignored, QSizePolicy::Fixed);
+  setMinimumWidth(fewestPixels);
 }
 
 void ElidedComboBox::showPopup() {
@@ -54,6 +56,11 @@ void ElidedComboBox::paintEvent(QPaintEvent*) {
       fontMetrics().elidedText(option.currentText, Qt::ElideRight, field.width() - 4);
   painter.drawComplexControl(QStyle::CC_ComboBox, option);
   painter.drawControl(QStyle::CE_ComboBoxLabel, option);
+  painter.setRenderHint(QPainter::Antialiasing);
+  painter.setPen(QPen(
+      palette().color(isEnabled() ? QPalette::Active : QPalette::Disabled, QPalette::Text), 1.5));
+  const QPointF tip(width() - 14, 0.5 * height() + 2.5);
+  painter.drawPolyline(QPolygonF{tip - QPointF(5, 5), tip, tip + QPointF(5, -5)});
 }
 
 QString breakable(const QString& text, int most) {

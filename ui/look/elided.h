@@ -24,7 +24,8 @@ class ElidedLabel : public QLabel {
   QString whole_;
 };
 
-/// The same for a list of choices: the chosen one is elided, the open list shows all in full.
+/// The same for a list of choices: the chosen one is elided, the open list shows all in full. It
+/// draws its own arrow, which a style sheet takes away from Qt's.
 class ElidedComboBox : public QComboBox {
  public:
   explicit ElidedComboBox(QWidget* parent = nullptr);

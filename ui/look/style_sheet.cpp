@@ -20,6 +20,8 @@ QLabel#promise { background: @action; color: @onAction; border-radius: 6px; padd
 QPushButton#dropPlace { border: 2px dashed @bandOutline; background: @card; color: @quiet; }
 QPushButton#dropPlace:hover, QPushButton#dropPlace:focus { border: 2px dashed @action;
   color: @action; }
+QDialog QLabel { padding-right: 3px; }
+QDialogButtonBox { dialogbuttonbox-buttons-have-icons: 0; }
 QLabel#quiet { color: @quiet; }
 QLabel#warning { color: @evidence; }
 QToolTip { background: @card; color: @ink; border: 1px solid @hairline; padding: 4px; }
@@ -45,7 +47,7 @@ QLineEdit, QComboBox, QPlainTextEdit { background: @card; color: @ink;
   selection-background-color: @action; selection-color: @onAction; }
 QLineEdit:focus, QComboBox:focus, QPlainTextEdit:focus { border: 2px solid @action;
   padding: 2px 7px; }
-QComboBox::drop-down { border: none; width: 20px; }
+QComboBox::drop-down { border: none; width: 24px; }
 QComboBox QAbstractItemView { background: @card; color: @ink; border: 1px solid @hairline;
   selection-background-color: @action; selection-color: @onAction; }
 
@@ -54,6 +56,7 @@ QMenuBar::item { padding: 4px 10px; background: transparent; border-radius: 4px;
 QMenuBar::item:selected { background: @selected; }
 QMenu { background: @card; color: @ink; border: 1px solid @hairline; padding: 4px; }
 QMenu::item { padding: 5px 28px 5px 28px; border-radius: 4px; }
+QMenu::icon { padding-left: 8px; }
 QMenu::item:selected { background: @action; color: @onAction; }
 QMenu::item:disabled { color: @quiet; background: transparent; }
 QMenu::separator { height: 1px; background: @hairline; margin: 4px 8px; }

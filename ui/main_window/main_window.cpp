@@ -6,6 +6,7 @@
 #include <QLabel>
 #include <QMenuBar>
 #include <QMessageBox>
+#include <QScreen>
 #include <QSettings>
 #include <QStackedWidget>
 #include <QVBoxLayout>
@@ -82,7 +83,9 @@ void MainWindow::build() {
   column->addWidget(pages_, 1);
   setCentralWidget(middle);
   setAcceptDrops(true);
-  resize(1440, 900);
+  // As large as was drawn for, but never larger than the screen less a window's frame.
+  const QSize frame(16, 40);
+  resize(QSize(1440, 900).boundedTo(screen()->availableSize() - frame));
 }
 
 void MainWindow::on(ActionId id, const std::function<void()>& does) {
@@ -160,7 +163,7 @@ void MainWindow::refresh() {
   does[ActionId::JobDetails]->setEnabled(hasJob);
   does[ActionId::Limits]->setEnabled(hasJob);
   does[ActionId::Damper]->setEnabled(hasJob && !session_.selected().corner.isEmpty());
-  does[ActionId::PrintSheet]->setEnabled(hasJob && !session_.job().items.empty());
+  does[ActionId::PrintSheet]->setEnabled(hasJob && isPrintable(session_.job()));
   does[ActionId::Undo]->setEnabled(session_.undoStack()->canUndo());
   does[ActionId::Redo]->setEnabled(session_.undoStack()->canRedo());
   const auto cycle = jobPage_->loops()->run()->chosenCycle();

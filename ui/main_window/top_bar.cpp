@@ -39,6 +39,7 @@ TopBar::TopBar(Session& session, const Actions& actions, QWidget* parent)
   number_->setFont(screenFont(TextSize::Job));
   about_->setObjectName(QStringLiteral("quiet"));
   invented_->setObjectName(QStringLiteral("chip"));
+  invented_->setSizePolicy(QSizePolicy::Fixed, QSizePolicy::Fixed);
   invented_->setFont(screenFont(TextSize::Quiet));
   invented_->setToolTip(tr("The demonstration: nothing in it was measured on a real bench."));
   auto* row = new QHBoxLayout(this);

@@ -64,7 +64,7 @@ std::vector<CurveDot> dotsOf(const Measurement& measurement) {
       dots.push_back(
           {point.block,
            {sign * shownVelocity(reading.peakVelocity), sign * shownForce(reading.force)},
-           barCoverage * shownForce(reading.forceU)});
+           barCoverage * shownForce(reading.forceTotalU)});
     }
   }
   return dots;

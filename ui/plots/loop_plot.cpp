@@ -140,7 +140,7 @@ void LoopPlot::drawLoops() {
   if (!figure_.gasLine.empty())
     setPoints(addCurve(canvas_, QPen(canvas_->colours().quiet, 1, Qt::DashLine)), figure_.gasLine);
   for (const LoopLine& loop : figure_.loops)
-    setPoints(addCurve(canvas_, QPen(canvas_->colours().action, 1)), loop.points);
+    setPoints(addCurve(canvas_, canvas_->dataPen(canvas_->colours().action)), loop.points);
 }
 
 void LoopPlot::drawDots() {

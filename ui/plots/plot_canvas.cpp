@@ -32,6 +32,8 @@ PlotCanvas::PlotCanvas(QWidget* parent) : QCustomPlot(parent) {
   addLayer(QStringLiteral("pointing"), layer(QStringLiteral("main")), limAbove);
   overlay_ = layer(QStringLiteral("pointing"));
   overlay_->setMode(QCPLayer::lmBuffered);
+  constexpr double fineScreen = 1.5;
+  if (devicePixelRatioF() >= fineScreen) setPlottingHint(QCP::phFastPolylines);
   setInteractions(QCP::iRangeDrag | QCP::iRangeZoom);
   hover_.setSingleShot(true);
   hover_.setInterval(frameMs);
@@ -63,6 +65,10 @@ void PlotCanvas::applyColours() {
 void PlotCanvas::changeEvent(QEvent* event) {
   QCustomPlot::changeEvent(event);
   if (event->type() == QEvent::PaletteChange) applyColours();
+}
+
+QPen PlotCanvas::dataPen(const QColor& colour) const {
+  return QPen(colour, plottingHints().testFlag(QCP::phFastPolylines) ? 1.25 : 1);
 }
 
 void PlotCanvas::setEmptyText(const QString& text) {

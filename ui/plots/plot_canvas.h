@@ -22,6 +22,9 @@ class PlotCanvas : public QCustomPlot {
 
   const Palette& colours() const { return colours_; }
   void setEmptyText(const QString& text);  ///< empty: there is something to draw
+  /// A pen for data: one pixel on a coarse screen (wider ones are drawn far slower there), as wide
+  /// as the grid at least on a fine one.
+  QPen dataPen(const QColor& colour) const;
   QCPLayer* overlay() const { return overlay_; }
 
   /// Axis rectangles of ours look and behave alike: call for each one added.

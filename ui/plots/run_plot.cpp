@@ -136,7 +136,7 @@ void RunPlot::drawStrip(Strip& strip) {
   double low = INFINITY, high = -INFINITY;
   for (const Envelope& channel : strip.channels) {
     auto* graph = new QCPGraph(x, y);
-    graph->setPen(QPen(isForce ? canvas_->colours().action : canvas_->colours().ink, 1));
+    graph->setPen(canvas_->dataPen(isForce ? canvas_->colours().action : canvas_->colours().ink));
     graph->setAdaptiveSampling(false);
     strip.graphs.push_back(graph);
     low = std::fmin(low, shownFromSi(channel.smallest(), quantity));

@@ -15,6 +15,7 @@
 #include <QSettings>
 #include <QVBoxLayout>
 
+#include "ui/look/elided.h"
 #include "ui/sheet/sheet_output.h"
 #include "ui/sheet/sheet_pages.h"
 #include "ui/sheet/workshop_settings.h"
@@ -68,7 +69,7 @@ SheetPreview::SheetPreview(SheetContent content, QWidget* parent)
 }
 
 QWidget* SheetPreview::makeBar() {
-  paper_ = new QComboBox;
+  paper_ = new ElidedComboBox;
   paper_->addItem(tr("A4"), static_cast<int>(PaperSize::A4));
   paper_->addItem(tr("Letter"), static_cast<int>(PaperSize::Letter));
   paper_->setCurrentIndex(paper_->findData(static_cast<int>(keptPaper())));

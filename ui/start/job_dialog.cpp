@@ -1,13 +1,13 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/start/job_dialog.h"
 
-#include <QComboBox>
 #include <QDialogButtonBox>
 #include <QFormLayout>
 #include <QLineEdit>
 #include <QPlainTextEdit>
 #include <QPushButton>
 
+#include "ui/look/elided.h"
 #include "ui/text/names.h"
 
 namespace dampwright {
@@ -23,7 +23,7 @@ std::string typed(const QLineEdit* edit) { return edit->text().trimmed().toStdSt
 JobDialog::JobDialog(Use use, const Job& job, QWidget* parent)
     : QDialog(parent),
       job_(job),
-      kind_(new QComboBox),
+      kind_(new ElidedComboBox),
       customer_(field(job.customer)),
       vehicle_(field(job.vehicle)),
       plate_(field(job.plate)),

@@ -4,11 +4,12 @@
 
 #include "core/job/job.h"
 
-class QComboBox;
 class QLineEdit;
 class QPlainTextEdit;
 
 namespace dampwright {
+
+class ElidedComboBox;
 
 /// Customer, vehicle, plate, technician and notes of a job. For a new job also the kind of vehicle;
 /// for a job that has one it stays as it is, because its runs belong to its corners.
@@ -22,7 +23,7 @@ class JobDialog : public QDialog {
 
  private:
   Job job_;
-  QComboBox* kind_;
+  ElidedComboBox* kind_;
   QLineEdit *customer_, *vehicle_, *plate_, *technician_;
   QPlainTextEdit* notes_;
 };

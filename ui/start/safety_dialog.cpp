@@ -30,7 +30,7 @@ SafetyDialog::SafetyDialog(QWidget* parent) : QDialog(parent) {
   understood->setObjectName(QStringLiteral("primary"));
   understood->setDefault(true);
   column->addWidget(understood, 0, Qt::AlignRight);
-  setMinimumWidth(520);
+  setMinimumWidth(580);
   connect(understood, &QPushButton::clicked, this, &QDialog::accept);
 }
 

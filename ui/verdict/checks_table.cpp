@@ -16,7 +16,7 @@ namespace dampwright {
 
 namespace {
 
-constexpr int heightOfRow = 40, barWidth = 72, markWidth = 28, rowsAlwaysShown = 4;
+constexpr int heightOfRow = 40, barWidth = 62, markWidth = 24, rowsAlwaysShown = 4;
 
 // Title and measured value share the first column on two lines; the second column is there for
 // readers of the table and takes no room on screen.

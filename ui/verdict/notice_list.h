@@ -17,6 +17,8 @@ class NoticeList : public QScrollArea {
   explicit NoticeList(QWidget* parent = nullptr);
 
   void setNotices(const std::vector<NoticeView>& notices);
+  QSize sizeHint() const override { return {300, 96}; }
+  QSize minimumSizeHint() const override { return {200, 96}; }
 
  signals:
   void directionSettled(dampwright::Direction displacementPositive);

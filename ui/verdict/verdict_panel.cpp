@@ -47,7 +47,7 @@ VerdictPanel::VerdictPanel(QWidget* parent)
       line_(new QLabel),
       rule_(quiet(new QLabel)),
       checksHeading_(heading(tr("Checks"))),
-      notesHeading_(heading(tr("Remarks"))),
+      notesHeading_(heading(tr("Reasons and remarks"))),
       limits_(new ElidedComboBox),
       checks_(new ChecksTable),
       notices_(new NoticeList),
@@ -83,9 +83,10 @@ void VerdictPanel::buildColumn() {
   column->addWidget(line_);
   column->addLayout(limitsRow);
   column->addLayout(checksRow);
-  column->addWidget(checks_, 1);
+  column->addWidget(checks_);
   column->addWidget(notesHeading_);
   column->addWidget(notices_, 1);
+  column->addStretch();  // keeps all this together where there is nothing to remark
   column->addWidget(sheet_);
 }
 

@@ -114,7 +114,7 @@ VerdictView verdictView(const Session& session) {
   view.busy = state.busy;
   view.measured = state.measured != nullptr;
   view.broken = state.problem.has_value();
-  for (const JobItem& item : session.job().items) view.printable |= !item.phases.empty();
+  view.printable = isPrintable(session.job());
   view.verdict = state.verdict;
   if (state.problem)
     add(view.notices, {{}, sentenceText(*state.problem), {}, true, NoticeAction::None, 0});
@@ -123,10 +123,15 @@ VerdictView verdictView(const Session& session) {
   return view;
 }
 
+bool isPrintable(const Job& job) {
+  return std::any_of(
+      job.items.begin(), job.items.end(), [](const JobItem& item) { return !item.phases.empty(); });
+}
+
 QString verdictLine(const VerdictView& view) {
   if (view.busy && !view.measured) return Panel::tr("The run is being measured.");
   if (view.broken) return Panel::tr("This run could not be measured.");
-  if (!view.measured) return Panel::tr("No run yet.");
+  if (!view.measured) return Panel::tr("No run yet. Drop its files on the corner.");
   if (!view.chosen) return Panel::tr("Choose limits to get a verdict.");
   return view.verdict ? verdictSummary(*view.verdict) : QString();
 }

@@ -43,6 +43,9 @@ struct VerdictView {
 
 VerdictView verdictView(const Session& session);
 
+/// Whether a job has anything for a sheet.
+bool isPrintable(const Job& job);
+
 /// One sentence below the stamp: the verdict in numbers, or what is missing for one.
 QString verdictLine(const VerdictView& view);
 

@@ -7,6 +7,7 @@
 #include "ui/corners/vehicle_view.h"
 #include "ui/main_window/actions.h"
 #include "ui/main_window/job_page.h"
+#include "ui/main_window/work_status.h"
 #include "ui/plots/loop_plot.h"
 #include "ui/plots/loops_view.h"
 #include "ui/start/start_page.h"
@@ -136,6 +137,23 @@ TEST_F(MainWindowTest, LongNamesAreElidedAndStandWholeInTheTooltip) {
   for (const QLabel* label : window->findChildren<QLabel*>())
     whole = whole || label->toolTip().contains(QString(300, 'x'));
   EXPECT_TRUE(whole);
+}
+
+TEST_F(MainWindowTest, WorkThatTakesLongerSaysSoAndIsStopped) {
+  WorkStatus* status = window->findChild<WorkStatus*>();
+  ASSERT_NE(status, nullptr);
+  EXPECT_FALSE(status->isVisible());
+  session->openDemonstration();
+  for (int waited = 0; waited < 500 && session->busy() && !status->isVisible(); ++waited)
+    QTest::qWait(10);
+  if (status->isVisible()) {  // a fast machine is done before anybody's patience
+    QPushButton* stop = status->findChild<QPushButton*>();
+    EXPECT_EQ(stop->text(), "Stop");
+    QTest::mouseClick(stop, Qt::LeftButton);
+  }
+  waitForWork();
+  QTest::qWait(50);
+  EXPECT_FALSE(status->isVisible());
 }
 
 TEST_F(MainWindowTest, TheThemeIsKept) {

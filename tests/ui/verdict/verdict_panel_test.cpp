@@ -27,6 +27,7 @@ class VerdictPanelTest : public testing::Test {
   void SetUp() override {
     view.hasJob = true;
     view.measured = true;
+    view.printable = true;
     view.damper = "Rear left · DA-1109";
     view.verdict = made::verdict();
     view.known = {named("Car limits"), named("Motorcycle limits")};
@@ -143,7 +144,7 @@ TEST_F(VerdictPanelTest, AFilesWordsAreNeverMarkup) {
 }
 
 TEST_F(VerdictPanelTest, WithoutARunItSaysWhatIsMissing) {
-  view.measured = false;
+  view.measured = view.printable = false;
   view.verdict.reset();
   panel.setView(view);
   EXPECT_TRUE(everythingSaid().contains("No run yet"));
