@@ -63,7 +63,7 @@ QMenu::separator { height: 1px; background: @hairline; margin: 4px 8px; }
 
 QTreeWidget, QTableView { background: @card; color: @ink; border: 1px solid @hairline;
   border-radius: 6px; selection-background-color: @selected; selection-color: @ink; }
-QTreeWidget::item { min-height: 28px; }
+QTreeWidget::item { min-height: 28px; padding: 0 4px; }
 QTreeWidget:focus { border: 2px solid @action; }
 QTableView { border: none; }
 QTableView:focus { border: none; }

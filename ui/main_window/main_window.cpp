@@ -16,6 +16,7 @@
 #include "ui/corners/dropped_files.h"
 #include "ui/corners/vehicle_view.h"
 #include "ui/look/palette.h"
+#include "ui/main_window/about.h"
 #include "ui/main_window/actions.h"
 #include "ui/main_window/choose_files.h"
 #include "ui/main_window/job_page.h"
@@ -93,19 +94,25 @@ void MainWindow::on(ActionId id, const std::function<void()>& does) {
 }
 
 void MainWindow::connectActions() {
+  const auto onJobPage = [this](ActionId id, const std::function<void()>& does) {
+    on(id, [this, does] {
+      showJobPage();
+      does();
+    });
+  };
   on(ActionId::NewJob, [this] { startNewJob({}); });
   on(ActionId::StartPage, [this] { pages_->setCurrentWidget(startPage_); });
   on(ActionId::Demonstration, [this] { session_.openDemonstration(); });
   on(ActionId::AddRuns, [this] { takeFiles(chooseRunFiles(this), {}); });
-  on(ActionId::Limits, [this] { jobPage_->verdict()->openLimits(); });
+  onJobPage(ActionId::Limits, [this] { jobPage_->verdict()->openLimits(); });
   on(ActionId::PrintSheet, [this] { showSheet(); });
   on(ActionId::Quit, [this] { close(); });
   on(ActionId::FitPlots, [this] { jobPage_->loops()->fit(); });
-  on(ActionId::GoToCorners, [this] { jobPage_->corners()->vehicle()->takeFocus(); });
-  on(ActionId::GoToLoops, [this] { jobPage_->loops()->forceVelocity()->setFocus(); });
-  on(ActionId::GoToVerdict, [this] { jobPage_->verdict()->takeFocus(); });
+  onJobPage(ActionId::GoToCorners, [this] { jobPage_->corners()->vehicle()->takeFocus(); });
+  onJobPage(ActionId::GoToLoops, [this] { jobPage_->loops()->forceVelocity()->setFocus(); });
+  onJobPage(ActionId::GoToVerdict, [this] { jobPage_->verdict()->takeFocus(); });
   on(ActionId::Safety, [this] { SafetyDialog(this).exec(); });
-  on(ActionId::About, [this] { showAbout(); });
+  on(ActionId::About, [this] { showAbout(this); });
   QAction* dark = (*actions_)[ActionId::Dark];
   dark->setChecked(keptTheme() == Theme::Dark);
   connect(dark, &QAction::toggled, this, [](bool on) {
@@ -160,7 +167,9 @@ void MainWindow::refresh() {
   top_->setJob(hasJob ? &session_.job() : nullptr);
   startPage_->setRecentJobs(session_.recentJobs());
   const Actions& does = *actions_;
-  does[ActionId::JobDetails]->setEnabled(hasJob);
+  for (const ActionId id :
+       {ActionId::JobDetails, ActionId::GoToCorners, ActionId::GoToLoops, ActionId::GoToVerdict})
+    does[id]->setEnabled(hasJob);
   does[ActionId::Limits]->setEnabled(hasJob);
   does[ActionId::Damper]->setEnabled(hasJob && !session_.selected().corner.isEmpty());
   does[ActionId::PrintSheet]->setEnabled(hasJob && isPrintable(session_.job()));
@@ -237,17 +246,6 @@ void MainWindow::showSheet() {
   } else {
     QMessageBox::warning(this, tr("No sheet"), sentenceText(content.error()));
   }
-}
-
-void MainWindow::showAbout() {
-  QMessageBox::about(
-      this,
-      tr("About Dampwright"),
-      tr("Dampwright %1\n\nFrom a damper's run file to a verdict with its uncertainty and a sheet "
-         "for the customer.\n\nFree software under the GNU General Public License, version 3 or "
-         "later. It comes without any warranty. Made with Qt, QCustomPlot, Eigen, nlohmann/json, "
-         "Boost, OpenSSL and CLI11.")
-          .arg(QStringLiteral(DAMPWRIGHT_VERSION)));
 }
 
 void MainWindow::changeEvent(QEvent* event) {

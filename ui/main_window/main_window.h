@@ -51,7 +51,6 @@ class MainWindow : public QMainWindow {
   void editJob();
   void editDamper(const QString& corner);
   void showSheet();
-  void showAbout();
 
   Session& session_;
   Actions* actions_;

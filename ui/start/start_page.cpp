@@ -16,7 +16,7 @@ namespace dampwright {
 
 namespace {
 
-constexpr int pageWidth = 860;
+constexpr int pageWidth = 960;
 
 enum Column { Number, Customer, Vehicle, Plate, Opened, Word, ColumnCount };
 

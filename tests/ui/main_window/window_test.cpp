@@ -94,6 +94,14 @@ TEST_F(MainWindowTest, TheKeyboardReachesEveryPart) {
   EXPECT_TRUE(window->jobPage()->verdict()->isAncestorOf(QApplication::focusWidget()));
 }
 
+TEST_F(MainWindowTest, FromTheRecentJobsOneGoesBackToTheJob) {
+  openDemonstration();
+  QTest::keyClick(window.get(), Qt::Key_J, Qt::ControlModifier);
+  EXPECT_TRUE(window->startPage()->isVisible());
+  QTest::keyClick(window.get(), Qt::Key_1, Qt::AltModifier);
+  EXPECT_TRUE(window->jobPage()->isVisible());
+}
+
 TEST_F(MainWindowTest, TabWalksThroughEveryControlAndComesBack) {
   openDemonstration();
   window->jobPage()->corners()->vehicle()->takeFocus();
