@@ -3,6 +3,7 @@
 
 #include <QCoreApplication>
 #include <QImage>
+#include <QSize>
 #include <cstdio>
 
 #include "core/words/words.h"
@@ -17,6 +18,7 @@ namespace {
 constexpr int lookEveryMs = 50;
 // Work may hand over to other work for an instant, and plots draw a frame later.
 constexpr int quietEnough = 8;
+constexpr QSize pictureSize{1440, 900};  // whatever the screen is
 constexpr int inputUnusable = 3, outputUnwritable = 4;
 
 int complain(int status, const std::string& line) {
@@ -28,6 +30,7 @@ int complain(int status, const std::string& line) {
 
 Unattended::Unattended(Session& session, MainWindow& window, const GuiOptions& options)
     : session_(session), window_(window), options_(options) {
+  if (!options_.picture.isEmpty()) window_.resize(pictureSize);
   connect(&clock_, &QTimer::timeout, this, &Unattended::look);
   clock_.start(lookEveryMs);
 }
