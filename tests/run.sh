@@ -10,5 +10,4 @@ install_packages $packages_program $packages_tests
 [ -f build/dev/build.ninja ] || quietly cmake --preset dev
 echo "Building Dampwright and its tests (several minutes the first time)"
 quietly cmake --build --preset dev
-quietly cmake --build --preset dev --target all_verify_interface_header_sets
 QT_QPA_PLATFORM=offscreen ctest --preset dev --output-on-failure -j "$(nproc)" "$@"
