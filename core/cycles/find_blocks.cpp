@@ -16,8 +16,8 @@ namespace dampwright {
 namespace {
 
 // First sample behind `from` at which the displacement has risen through the level.
-double risesThrough(const Motion& motion, double from, double level) {
-  auto i = static_cast<std::size_t>(from) + 1;
+double risesThrough(const Motion& motion, std::size_t from, double level) {
+  std::size_t i = from + 1;
   while (i + 1 < motion.size() && motion.displacement[i] < level) ++i;
   const double before = motion.displacement[i - 1], here = motion.displacement[i];
   const double share = here > before ? (level - before) / (here - before) : 1;
@@ -26,10 +26,9 @@ double risesThrough(const Motion& motion, double from, double level) {
 
 // Mean speed over the middle fifth of the way up: within 1 % of the peak of a sine.
 double middleSpeed(const Motion& motion, const RawCycle& cycle) {
-  const auto start = static_cast<std::size_t>(cycle.start);
-  const double low = motion.displacement[start];
-  const double from = risesThrough(motion, cycle.start, low + 0.4 * cycle.stroke);
-  const double to = risesThrough(motion, from, low + 0.6 * cycle.stroke);
+  const double low = motion.displacement[cycle.firstSample()];
+  const double from = risesThrough(motion, cycle.firstSample(), low + 0.4 * cycle.stroke);
+  const double to = risesThrough(motion, static_cast<std::size_t>(from), low + 0.6 * cycle.stroke);
   return to > from ? 0.2 * cycle.stroke / (to - from) * motion.rate : 0;
 }
 
@@ -64,7 +63,7 @@ std::optional<double> BlockMaker::temperatureOf(const std::vector<RawCycle>& cyc
   double sum = 0, count = 0;
   for (const RawCycle& cycle : cycles) {
     const auto to = std::min(static_cast<std::size_t>(cycle.end), motion_.size() - 1);
-    for (auto i = static_cast<std::size_t>(cycle.start); i <= to; ++i, count += 1)
+    for (std::size_t i = cycle.firstSample(); i <= to; ++i, count += 1)
       sum += motion_.temperature[i];
   }
   return sum / count;

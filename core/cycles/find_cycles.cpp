@@ -84,11 +84,11 @@ std::vector<TurningPoint> withoutFalseEdges(std::vector<TurningPoint> turns, dou
   return turns;
 }
 
-// The longest run of samples without displacement inside [from, to].
-double longestMissing(const std::vector<char>& doubtful, double from, double to) {
+// The longest run of samples without displacement inside a cycle.
+double longestMissing(const std::vector<char>& doubtful, const RawCycle& cycle) {
   std::size_t longest = 0, run = 0;
-  const auto end = std::min(static_cast<std::size_t>(std::ceil(to)) + 1, doubtful.size());
-  for (auto i = static_cast<std::size_t>(from); i < end; ++i) {
+  const auto end = std::min(static_cast<std::size_t>(std::ceil(cycle.end)) + 1, doubtful.size());
+  for (std::size_t i = cycle.firstSample(); i < end; ++i) {
     run = (doubtful[i] & PlaceMissing) != 0 ? run + 1 : 0;
     longest = std::max(longest, run);
   }
@@ -110,7 +110,7 @@ std::vector<RawCycle> cyclesOf(const Motion& motion,
                          offset + turns[i + 2].place,
                          (up + down) / 2,
                          segment};
-    if (longestMissing(motion.doubtful, cycle.start, cycle.end) <= missingShare * cycle.period())
+    if (longestMissing(motion.doubtful, cycle) <= missingShare * cycle.period())
       cycles.push_back(cycle);
   }
   return cycles;

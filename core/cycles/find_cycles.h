@@ -1,5 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
+#include <algorithm>
 #include <cstddef>
 #include <span>
 #include <vector>
@@ -11,11 +12,14 @@ namespace dampwright {
 
 /// A cycle in samples (between them), with what tells it from its neighbours.
 struct RawCycle {
-  double start = 0, top = 0, end = 0;  ///< samples
+  double start = 0, top = 0, end = 0;  ///< samples; start may be −1, end the number of samples
   double stroke = 0;                   ///< m, mean of both half strokes
   std::size_t segment = 0;             ///< stretch without a rest that it lies in, by number
 
   double period() const { return end - start; }
+
+  /// A turn at the very edge of a recording may stand up to a sample before the first one.
+  std::size_t firstSample() const { return static_cast<std::size_t>(std::max(start, 0.0)); }
 };
 
 /// What was found on the way, for those who ask why there is no cycle.
