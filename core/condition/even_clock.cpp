@@ -37,7 +37,8 @@ Line lineThrough(std::span<const double> times) {
 // The largest power of ten that all stamps are whole multiples of, apart from the first; 0 for
 // none.
 double lastPlace(std::span<const double> times) {
-  for (double place = 1; place > 0.5e-6; place /= 10) {
+  for (int decimals = 0; decimals <= 6; ++decimals) {
+    const double place = std::pow(10.0, -decimals);
     const auto whole = [&](double time) {
       const double multiple = (time - times[0]) / place;
       return std::abs(multiple - std::round(multiple)) < 1e-3;

@@ -44,7 +44,7 @@ struct Window {
 
 // Variance of the samples about the polynomial that the window fits.
 double residualVariance(const Window& window, std::span<const double> force) {
-  const auto count = static_cast<std::size_t>(2 * window.half + 1);
+  const auto count = 2 * static_cast<std::size_t>(window.half) + 1;
   std::vector<double> cut(count);
   for (std::size_t i = 0; i < count; ++i)
     cut[i] =

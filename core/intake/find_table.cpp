@@ -67,9 +67,9 @@ Cells joinedWhere(const Cells& cells, Belongs belongs) {
 // The names of a header whose columns are split by blanks, where names may hold blanks themselves:
 // two blanks or a tab part them, and a bracket belongs to the name before it.
 Cells headerCells(std::string_view row, const Dialect& dialect) {
-  const Cells single = splitRow(row, dialect.delimiter);
+  Cells single = splitRow(row, dialect.delimiter);
   if (dialect.delimiter != blanksDelimiter || single.size() == dialect.columns) return single;
-  const Cells wide = joinedWhere(single, [](const Cell& before, const Cell& cell) {
+  Cells wide = joinedWhere(single, [](const Cell& before, const Cell& cell) {
     const char* gap = before.text.data() + before.text.size();
     return startsBracket(cell) || (cell.text.data() - gap == 1 && *gap != '\t');
   });

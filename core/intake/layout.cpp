@@ -52,6 +52,7 @@ std::string signatureOfTable(const Table& table, const Dialect& dialect) {
     return signatureOfUnnamed(table.columns.size(), delimiterName(dialect.delimiter));
   }
   std::vector<SignatureColumn> columns;
+  columns.reserve(table.columns.size());
   for (const NameAndUnit& column : table.columns) columns.push_back({column.name, column.unit});
   return signatureOf(columns);
 }

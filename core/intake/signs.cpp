@@ -16,7 +16,9 @@ DirectionChoice chooseDirection(const std::optional<Direction>& asked,
   if (rig) return {*rig, true};
   if (const auto named = directionOfName(columnName)) return {*named, true};
   for (const auto& [key, value] : metadata) {
-    if (const auto said = directionOfLine(key + " " + value)) return {*said, true};
+    std::string line = key;
+    line.append(" ").append(value);
+    if (const auto said = directionOfLine(line)) return {*said, true};
   }
   return {};
 }

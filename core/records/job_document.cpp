@@ -19,6 +19,7 @@ void describe(Fields& io, JobRun& run) {
 void describe(Fields& io, JobPhase& phase) {
   io.word("phase", phase.phase, words::phases);
   std::vector<std::pair<std::string, double>> setting;
+  setting.reserve(phase.setting.size());
   for (const SettingValue& one : phase.setting) setting.emplace_back(one.adjuster, one.value);
   io.numberByName("setting", setting, NameUnits::None);
   if (io.reading()) {

@@ -16,7 +16,7 @@ void fillRow(Eigen::MatrixXd& design, Eigen::Index row, double angle, int order)
   const double c = std::cos(angle), s = std::sin(angle);
   double cosine = 1, sine = 0;
   design(row, 0) = 1;
-  for (int h = 1; h <= order; ++h) {
+  for (Eigen::Index h = 1; h <= order; ++h) {
     const double next = cosine * c - sine * s;
     sine = sine * c + cosine * s;
     cosine = next;
@@ -77,7 +77,7 @@ Harmonics fitHarmonics(std::span<const double> times,
   const Eigen::VectorXd solved =
       (design.transpose() * design).ldlt().solve(design.transpose() * target);
   fit.mean = solved(0);
-  for (int h = 1; h <= kept; ++h) {
+  for (Eigen::Index h = 1; h <= kept; ++h) {
     fit.cosine.push_back(solved(2 * h - 1));
     fit.sine.push_back(solved(2 * h));
   }
