@@ -19,7 +19,7 @@ namespace {
 namespace fs = std::filesystem;
 
 struct Closer {
-  void operator()(std::FILE* file) const { std::fclose(file); }
+  void operator()(std::FILE* file) const { static_cast<void>(std::fclose(file)); }
 };
 using OpenFile = std::unique_ptr<std::FILE, Closer>;
 
