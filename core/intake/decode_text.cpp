@@ -4,7 +4,11 @@
 #include <algorithm>
 #include <array>
 #include <cstring>
+#include <utility>
 
+#include "core/intake/column_words.h"
+#include "core/intake/encodings.h"
+#include "core/intake/letters.h"
 #include "core/intake/recognise_other.h"
 
 namespace dampwright {
@@ -13,74 +17,11 @@ namespace {
 using std::string_view_literals::operator""sv;
 
 constexpr std::size_t headBytes = 4096;
-constexpr std::uint32_t replacement = 0xFFFD;
-
-// Windows-1252 bytes 0x80 to 0x9F; the five without a letter become U+FFFD. Source: the Encoding
-// Standard, index windows-1252.
-constexpr std::array<std::uint16_t, 32> windows1252 = {
-    0x20AC, 0xFFFD, 0x201A, 0x0192, 0x201E, 0x2026, 0x2020, 0x2021, 0x02C6, 0x2030, 0x0160,
-    0x2039, 0x0152, 0xFFFD, 0x017D, 0xFFFD, 0xFFFD, 0x2018, 0x2019, 0x201C, 0x201D, 0x2022,
-    0x2013, 0x2014, 0x02DC, 0x2122, 0x0161, 0x203A, 0x0153, 0xFFFD, 0x017E, 0x0178};
+constexpr std::size_t evidenceBytes = 8192;
+constexpr char32_t replacement = 0xFFFD;
 
 unsigned char byteAt(std::string_view bytes, std::size_t i) {
   return static_cast<unsigned char>(bytes[i]);
-}
-
-std::string withUtf8(std::string text, std::uint32_t point) {
-  const auto add = [&text](std::uint32_t byte) { text += static_cast<char>(byte); };
-  if (point < 0x80) {
-    add(point);
-  } else if (point < 0x800) {
-    add(0xC0 | point >> 6);
-    add(0x80 | (point & 0x3F));
-  } else if (point < 0x10000) {
-    add(0xE0 | point >> 12);
-    add(0x80 | (point >> 6 & 0x3F));
-    add(0x80 | (point & 0x3F));
-  } else {
-    add(0xF0 | point >> 18);
-    add(0x80 | (point >> 12 & 0x3F));
-    add(0x80 | (point >> 6 & 0x3F));
-    add(0x80 | (point & 0x3F));
-  }
-  return text;
-}
-
-std::string fromWindows1252(std::string_view bytes) {
-  std::string text;
-  text.reserve(bytes.size() + bytes.size() / 16);
-  for (std::size_t i = 0; i < bytes.size(); ++i) {
-    const unsigned char byte = byteAt(bytes, i);
-    if (byte < 0x80) {
-      text += bytes[i];
-    } else {
-      text = withUtf8(std::move(text), byte < 0xA0 ? windows1252[byte - 0x80] : byte);
-    }
-  }
-  return text;
-}
-
-// `high`: which byte of each pair is the more significant, 0 or 1. An odd last byte is left out: a
-// file still being written.
-std::string fromUtf16(std::string_view bytes, std::size_t high) {
-  const auto unit = [&](std::size_t i) {
-    return static_cast<std::uint32_t>(byteAt(bytes, i + high) << 8 | byteAt(bytes, i + 1 - high));
-  };
-  std::string text;
-  text.reserve(bytes.size() / 2 + bytes.size() / 32);
-  for (std::size_t i = 0; i + 1 < bytes.size(); i += 2) {
-    std::uint32_t point = unit(i);
-    if (point >= 0xD800 && point < 0xDC00 && i + 3 < bytes.size()) {
-      const std::uint32_t low = unit(i + 2);
-      if (low >= 0xDC00 && low < 0xE000) {
-        point = 0x10000 + ((point - 0xD800) << 10) + (low - 0xDC00);
-        i += 2;
-      }
-    }
-    if (point >= 0xD800 && point < 0xE000) point = replacement;
-    text = withUtf8(std::move(text), point);
-  }
-  return text;
 }
 
 std::size_t followersOf(unsigned char lead) {
@@ -144,29 +85,23 @@ std::string withBadBytesReplaced(std::string_view bytes) {
     const std::size_t bad = firstBadByte(bytes);
     text.append(bytes.substr(0, bad));
     if (bad == bytes.npos) return text;
-    text = withUtf8(std::move(text), replacement);
+    text = withLetter(std::move(text), replacement);
     bytes.remove_prefix(bad + 1);
   }
 }
 
-struct ZeroBytes {
-  std::size_t even = 0, odd = 0;
-};
-
-ZeroBytes zerosIn(std::string_view head) {
-  ZeroBytes zeros;
-  for (std::size_t i = 0; i < head.size(); ++i) {
-    if (head[i] == '\0') ++(i % 2 == 0 ? zeros.even : zeros.odd);
-  }
-  return zeros;
-}
-
-// Text of western letters in UTF-16 has a zero in nearly every second byte and none in the others.
+// Most pairs are a zero and a letter of ASCII, and hardly any the other way round: names may be of
+// any alphabet, numbers are not.
 std::string utf16ByZeros(std::string_view head) {
-  const ZeroBytes zeros = zerosIn(head);
-  const std::size_t most = head.size() / 2 * 7 / 10;
-  if (most > 0 && zeros.even == 0 && zeros.odd >= most) return "utf-16le";
-  if (most > 0 && zeros.odd == 0 && zeros.even >= most) return "utf-16be";
+  std::size_t little = 0, big = 0;
+  const auto ascii = [](char letter) { return letter >= '\t' && letter <= '~'; };
+  for (std::size_t i = 0; i + 1 < head.size(); i += 2) {
+    little += head[i + 1] == '\0' && ascii(head[i]) ? 1 : 0;
+    big += head[i] == '\0' && ascii(head[i + 1]) ? 1 : 0;
+  }
+  const std::size_t pairs = head.size() / 2;
+  if (little > 0 && 10 * little >= 6 * pairs && 20 * big <= pairs) return "utf-16le";
+  if (big > 0 && 10 * big >= 6 * pairs && 20 * little <= pairs) return "utf-16be";
   return {};
 }
 
@@ -177,24 +112,105 @@ constexpr std::array byteOrderMarks{ByteOrderMark{"\xEF\xBB\xBF"sv, "utf-8"},
                                     ByteOrderMark{"\xFF\xFE"sv, "utf-16le"},
                                     ByteOrderMark{"\xFE\xFF"sv, "utf-16be"}};
 
+// The first lines that hold anything outside ASCII, lines as they are: names, units, remarks.
+std::string linesThatTell(std::string_view bytes) {
+  std::string telling;
+  std::size_t from = 0;
+  while (from < bytes.size() && telling.size() < evidenceBytes) {
+    std::size_t at = from;
+    while (at < bytes.size() && byteAt(bytes, at) < 0x80) ++at;
+    if (at == bytes.size()) break;
+    const std::size_t before = bytes.find_last_of("\r\n", at);
+    const std::size_t start = std::max(before == bytes.npos ? 0 : before + 1, from);
+    const std::size_t end = std::min(bytes.find_first_of("\r\n", at), bytes.size());
+    telling.append(bytes.substr(start, std::min(end - start, evidenceBytes))).append("\n");
+    from = end;
+  }
+  return telling;
+}
+
+struct WideName {
+  std::string_view name;
+  WideEncoding encoding;
+};
+constexpr std::array wideNames{WideName{"shift-jis", WideEncoding::ShiftJis},
+                               WideName{"gb18030", WideEncoding::Gb18030}};
+
+// Of text that is not UTF-8: the encoding that decodes cleanly and in which the most trade words
+// stand; where that is a draw, the one whose usual letters the bytes are.
+std::string encodingOfBytes(std::string_view bytes) {
+  const std::string telling = linesThatTell(bytes);
+  std::string best = "windows-1252";
+  std::size_t words = tradeWordsIn(fromWindows1252(telling));
+  double share = usualShareOfWindows1252(telling);
+  for (const auto& [name, encoding] : wideNames) {
+    const auto sample = fromClean(telling, encoding);
+    if (!sample || !fromClean(bytes, encoding)) continue;
+    const std::size_t found = tradeWordsIn(*sample);
+    const double usual = usualShare(telling, encoding);
+    if (found < words || (found == words && usual <= share)) continue;
+    best = name;
+    words = found;
+    share = usual;
+  }
+  return best;
+}
+
 DecodedText converted(std::string_view raw, const std::string& encoding) {
-  DecodedText decoded{encoding, raw, std::nullopt, 0};
+  DecodedText decoded{encoding, raw, std::nullopt, 0, 0};
   if (encoding == "utf-16le") decoded.converted = fromUtf16(raw, 1);
   if (encoding == "utf-16be") decoded.converted = fromUtf16(raw, 0);
+  for (const auto& [name, wide] : wideNames) {
+    if (encoding == name) decoded.converted = fromAny(raw, wide);
+  }
   if (encoding == "windows-1252") decoded.converted = fromWindows1252(raw);
   return decoded;
 }
 
-DecodedText withoutZerosAtEnd(std::string_view bytes, std::string encoding) {
+DecodedText withoutZeros(DecodedText decoded) {
+  const std::string_view text = decoded.text();
+  const std::size_t last = text.find_last_not_of('\0');
+  const std::size_t kept = last == text.npos ? 0 : last + 1;
+  decoded.zeroBytesAtEnd = static_cast<std::int64_t>(text.size() - kept);
+  if (decoded.converted) {
+    decoded.converted->resize(kept);
+  } else {
+    decoded.raw = decoded.raw.substr(0, kept);
+    if (decoded.raw.find('\0') == decoded.raw.npos) return decoded;
+    decoded.converted = std::string(decoded.raw);
+  }
+  for (char& letter : *decoded.converted) {
+    if (letter != '\0') continue;
+    letter = ' ';
+    ++decoded.zeroBytesInside;
+  }
+  return decoded;
+}
+
+DecodedText bytesDecoded(std::string_view bytes, std::string encoding) {
   const std::size_t last = bytes.find_last_not_of('\0');
   const std::string_view kept = bytes.substr(0, last == bytes.npos ? 0 : last + 1);
   const std::string_view letters = withoutCutLetter(kept);
-  const bool valid = encoding != "windows-1252" && firstBadByte(letters) == bytes.npos;
-  if (encoding.empty()) encoding = valid ? "utf-8" : "windows-1252";
+  const bool asked = !encoding.empty();
+  const bool valid = (!asked || encoding == "utf-8") && firstBadByte(letters) == bytes.npos;
+  if (!asked) encoding = valid ? "utf-8" : encodingOfBytes(kept);
   DecodedText decoded = converted(encoding == "utf-8" ? letters : kept, encoding);
   if (encoding == "utf-8" && !valid) decoded.converted = withBadBytesReplaced(letters);
+  decoded = withoutZeros(std::move(decoded));
   decoded.zeroBytesAtEnd = static_cast<std::int64_t>(bytes.size() - kept.size());
   return decoded;
+}
+
+// Some zeros among text come from loggers that pad their fields or lost their power; with other
+// control characters beside them, or many of them, the file is no text.
+bool isBinary(std::string_view head) {
+  std::size_t zeros = 0, others = 0;
+  for (const char letter : head) {
+    const auto byte = static_cast<unsigned char>(letter);
+    zeros += byte == 0 ? 1 : 0;
+    others += byte > 0 && byte < 0x20 && (byte < '\t' || byte > '\r') && byte != 0x1A ? 1 : 0;
+  }
+  return zeros > 0 && (others > 0 || 4 * zeros > head.size());
 }
 
 }  // namespace
@@ -202,12 +218,13 @@ DecodedText withoutZerosAtEnd(std::string_view bytes, std::string encoding) {
 Result<DecodedText> decodeText(std::string_view bytes, const std::optional<std::string>& asked) {
   if (bytes.empty()) return Error{"file-empty", {}, {}};
   std::string encoding = asked.value_or("");
-  constexpr std::array known{"", "utf-8", "utf-16le", "utf-16be", "windows-1252"};
+  constexpr std::array known{
+      "", "utf-8", "utf-16le", "utf-16be", "windows-1252", "shift-jis", "gb18030"};
   if (std::find(known.begin(), known.end(), encoding) == known.end()) {
     return Error{"option-not-understood",
                  {{"option", "--encoding"},
                   {"value", encoding},
-                  {"choices", "utf-8, utf-16le, utf-16be, windows-1252"}},
+                  {"choices", "utf-8, utf-16le, utf-16be, windows-1252, shift-jis, gb18030"}},
                  {}};
   }
   for (const ByteOrderMark& mark : byteOrderMarks) {
@@ -218,10 +235,10 @@ Result<DecodedText> decodeText(std::string_view bytes, const std::optional<std::
   }
   if (const auto other = recogniseOther(bytes)) return *other;
   const std::string_view head = bytes.substr(0, headBytes);
-  if (encoding.empty()) encoding = utf16ByZeros(head.substr(0, head.size() / 2 * 2));
-  if (encoding.starts_with("utf-16")) return converted(bytes, encoding);
-  if (head.find('\0') != head.npos) return Error{"file-is-binary", {}, {}};
-  return withoutZerosAtEnd(bytes, encoding);
+  if (encoding.empty()) encoding = utf16ByZeros(head);
+  if (encoding.starts_with("utf-16")) return withoutZeros(converted(bytes, encoding));
+  if (isBinary(head)) return Error{"file-is-binary", {}, {}};
+  return bytesDecoded(bytes, encoding);
 }
 
 }  // namespace dampwright

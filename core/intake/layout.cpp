@@ -87,8 +87,12 @@ Result<Layout> findLayout(std::string_view bytes, const TextForm& form) {
   auto decoded = decodeText(bytes, form.encoding);
   if (!decoded) return decoded.error();
   Layout layout{std::move(decoded).value(), {}, {}, {}, {}};
+  layout.lineEnd = findLineEnd(layout.decoded.text());
+  if (auto even = withOneLineEnd(layout.decoded.text())) {
+    layout.decoded.converted = std::move(even);
+    layout.lineEnd.name = "mixed";
+  }
   const std::string_view text = layout.decoded.text();
-  layout.lineEnd = findLineEnd(text);
   const auto sample = sampleLines(text, layout.lineEnd.letter);
   if (!sample) return sample.error();
   auto dialect = findDialect(sample.value(), form.dialect);

@@ -63,7 +63,8 @@ std::optional<Entry> ofCells(std::string_view line, char delimiter) {
 }
 
 Entry entryOf(const Line& line, char delimiter) {
-  const std::string_view text = withoutCommentMark(line.text);
+  const std::string written = replaced(line.text, "：", ":");
+  const std::string_view text = withoutCommentMark(written);
   const auto cells = splitRow(text, delimiter);
   const bool keyCell = cells.size() > 1 && looksLikeKey(plainText(cells.front()));
   const std::string whole = plainText(splitRow(text, '\n').front());
@@ -92,30 +93,63 @@ struct RateWord {
   bool interval = false;
 };
 
-constexpr std::array rateWords{
-    RateWord{"sample rate", false},
-    RateWord{"samplerate", false},
-    RateWord{"sampling rate", false},
-    RateWord{"sampling frequency", false},
-    RateWord{"sample frequency", false},
-    RateWord{"data rate", false},
-    RateWord{"abtastrate", false},
-    RateWord{"abtastfrequenz", false},
-    RateWord{"messrate", false},
-    RateWord{"fs", false},
-    RateWord{"sample interval", true},
-    RateWord{"sampling interval", true},
-    RateWord{"sample time", true},
-    RateWord{"sampling time", true},
-    RateWord{"sample period", true},
-    RateWord{"time step", true},
-    RateWord{"delta_x", true},
-    RateWord{"delta t", true},
-    RateWord{"dt", true},
-    RateWord{"abtastintervall", true},
-    RateWord{"abtastzeit", true},
-    RateWord{"zeitschritt", true},
+// Parted by "|", as `folded` makes them; English, German, French, Italian, Spanish, Portuguese,
+// Dutch, Japanese, Chinese.
+struct RateWords {
+  std::string_view words;
+  bool interval = false;
 };
+
+constexpr std::array rateWords{
+    RateWords{"sample rate|samplerate|sampling rate|sampling frequency|sample frequency|data "
+              "rate|scan rate|acquisition rate|logging rate|fs",
+              false},
+    RateWords{"abtastrate|abtastfrequenz|messrate|messfrequenz|samplingrate", false},
+    RateWords{"frequence d'echantillonnage|frequence d'acquisition|taux d'echantillonnage|freq. "
+              "d'echantillonnage|cadence d'acquisition",
+              false},
+    RateWords{"frequenza di campionamento|freq. di campionamento|frequenza campionamento|frequenza "
+              "di acquisizione|velocita di campionamento",
+              false},
+    RateWords{
+        "frecuencia de muestreo|tasa de muestreo|velocidad de muestreo|frecuencia de adquisicion",
+        false},
+    RateWords{
+        "frequencia de amostragem|taxa de amostragem|taxa de aquisicao|frequencia de aquisicao",
+        false},
+    RateWords{"bemonsteringsfrequentie|samplefrequentie|meetfrequentie|bemonsteringssnelheid",
+              false},
+    RateWords{
+        "サンプリング周波数|サンプリングレート|サンプル周波数|サンプルレート|サンプリング速度",
+        false},
+    RateWords{"采样频率|采样率|采样速率|採樣頻率|採樣率|取樣頻率|取樣率", false},
+    RateWords{"sample interval|sampling interval|sample time|sampling time|sample period|sampling "
+              "period|time step|time increment|scan interval|delta_x|delta t|dt",
+              true},
+    RateWords{"abtastintervall|abtastzeit|zeitschritt|messintervall", true},
+    RateWords{"periode d'echantillonnage|intervalle d'echantillonnage|pas de temps", true},
+    RateWords{"periodo di campionamento|intervallo di campionamento|tempo di campionamento|passo "
+              "temporale",
+              true},
+    RateWords{"periodo de muestreo|intervalo de muestreo|tiempo de muestreo", true},
+    RateWords{"periodo de amostragem|intervalo de amostragem|tempo de amostragem", true},
+    RateWords{"bemonsteringsinterval|sampletijd|meetinterval|tijdstap", true},
+    RateWords{"サンプリング周期|サンプリング間隔|サンプル間隔|サンプリング時間", true},
+    RateWords{"采样间隔|采样周期|采样时间|採樣間隔|採樣週期|取樣間隔|取樣週期", true},
+};
+
+// A word of two letters must be the whole name.
+bool namesRate(std::string_view list, const std::string& name, const std::string& whole) {
+  while (!list.empty()) {
+    const std::size_t end = std::min(list.find('|'), list.size());
+    const std::string_view word = list.substr(0, end);
+    const bool found =
+        word.size() <= 2 ? name == word || whole == word : whole.find(word) != whole.npos;
+    if (found) return true;
+    list.remove_prefix(std::min(end + 1, list.size()));
+  }
+  return false;
+}
 
 // A number with its unit behind it: "2000", "2 kHz", "0,5 ms".
 struct Amount {
@@ -134,9 +168,24 @@ std::optional<Amount> amountIn(std::string_view text) {
   return Amount{*value, std::string(trimmed(text.substr(end)))};
 }
 
+constexpr std::array<std::string_view, 14> perSecond{"hz",
+                                                     "hertz",
+                                                     "1/s",
+                                                     "s-1",
+                                                     "s/s",
+                                                     "sps",
+                                                     "samples/s",
+                                                     "samples/sec",
+                                                     "samples per second",
+                                                     "s/sec",
+                                                     "/s",
+                                                     "ヘルツ",
+                                                     "赫兹",
+                                                     "赫茲"};
+
 std::optional<double> rateOf(const Amount& amount, const std::string& keyUnit, bool interval) {
   const std::string symbol = amount.unit.empty() ? keyUnit : amount.unit;
-  const std::string lower = lowered(symbol);
+  const std::string lower = folded(symbol);
   double value = amount.value;
   if (interval) {
     const auto unit = readUnit(symbol.empty() ? "s" : symbol);
@@ -144,8 +193,7 @@ std::optional<double> rateOf(const Amount& amount, const std::string& keyUnit, b
     value = 1 / unit->toSi(value);
   } else if (lower == "khz" || lower == "ks/s") {
     value *= 1000;
-  } else if (!lower.empty() && lower != "hz" && lower != "1/s" && lower != "s/s" &&
-             lower != "samples/s") {
+  } else if (!lower.empty() && std::ranges::find(perSecond, lower) == perSecond.end()) {
     return std::nullopt;
   }
   return std::isfinite(value) && value > 0 ? std::optional(value) : std::nullopt;
@@ -170,10 +218,9 @@ Metadata readMetadata(std::span<const Line> lines, char delimiter) {
 std::optional<double> sampleRateIn(const Metadata& metadata) {
   for (const auto& [key, value] : metadata) {
     const NameAndUnit named = splitNameAndUnit(key);
-    const std::string name = lowered(named.name), whole = lowered(key);
-    for (const RateWord& row : rateWords) {
-      const bool found = row.word.size() <= 2 ? name == row.word || whole == row.word
-                                              : whole.find(row.word) != whole.npos;
+    const std::string name = folded(named.name), whole = folded(key);
+    for (const RateWords& row : rateWords) {
+      const bool found = namesRate(row.words, name, whole);
       const auto amount = found ? amountIn(value) : std::nullopt;
       if (!amount) continue;
       if (const auto rate = rateOf(*amount, named.unit, row.interval)) return rate;

@@ -3,6 +3,7 @@
 
 #include <algorithm>
 #include <array>
+#include <utility>
 
 #include "core/intake/column_words.h"
 #include "core/intake/letters.h"
@@ -12,24 +13,31 @@ namespace {
 
 constexpr std::array<std::string_view, 4> brackets = {"()", "[]", "{}", "<>"};
 
-std::string replaced(std::string_view text, std::string_view from, std::string_view to) {
-  std::string result;
-  while (true) {
-    const std::size_t at = text.find(from);
-    result.append(text.substr(0, at));
-    if (at == text.npos) return result;
-    result.append(to);
-    text.remove_prefix(at + from.size());
-  }
+// The brackets of Japanese and Chinese text as ours.
+std::string withPlainBrackets(std::string_view text) {
+  constexpr std::array<std::pair<std::string_view, std::string_view>, 9> pairs{{{"（", "("},
+                                                                                {"）", ")"},
+                                                                                {"［", "["},
+                                                                                {"］", "]"},
+                                                                                {"【", "["},
+                                                                                {"】", "]"},
+                                                                                {"〔", "["},
+                                                                                {"〕", "]"},
+                                                                                {"　", " "}}};
+  std::string plain(text);
+  for (const auto& [wide, narrow] : pairs) plain = replaced(plain, wide, narrow);
+  return plain;
 }
 
 // "Weg in mm", "force_in_N": the word that only leads over to the unit.
 std::string_view withoutLeadIn(std::string_view name) {
-  constexpr std::string_view separators = " \t_,;:/-";
+  constexpr std::string_view separators = " \t_,;:/-.";
   const std::size_t last = name.find_last_not_of(separators);
   name = name.substr(0, last == name.npos ? 0 : last + 1);
   const std::string lower = lowered(name);
-  if (lower.ends_with(" in") || lower.ends_with("_in")) name.remove_suffix(3);
+  for (const std::string_view word : {" in", "_in", " en", " em"}) {
+    if (lower.ends_with(word)) return trimmed(name.substr(0, name.size() - word.size()));
+  }
   return trimmed(name);
 }
 
@@ -57,7 +65,7 @@ std::optional<NameAndUnit> inBrackets(std::string_view heading) {
 // The longest known unit behind a blank, comma, stroke or underscore at the end of the name.
 std::optional<NameAndUnit> behindSeparator(std::string_view heading) {
   for (std::size_t at = 1; at + 1 < heading.size(); ++at) {
-    if (std::string_view(" \t,/_").find(heading[at]) == std::string_view::npos) continue;
+    if (std::string_view(" \t,/_.:-").find(heading[at]) == std::string_view::npos) continue;
     const std::string_view symbol = trimmed(heading.substr(at + 1));
     const auto unit = readUnit(symbol);
     if (!unit) continue;
@@ -89,20 +97,24 @@ std::optional<Unit> readUnit(std::string_view symbol) {
   const std::string_view bare = withoutBrackets(symbol);
   if (bare.empty()) return std::nullopt;
   if (const auto unit = unitFromSymbol(bare)) return unit;
-  std::string spelled = replaced(lowered(bare), "_per_", "/");
+  const std::string plain = folded(bare);
+  if (const auto unit = unitFromSymbol(withoutBrackets(plain))) return unit;
+  std::string spelled = replaced(std::string(withoutBrackets(plain)), "_per_", "/");
+  spelled = replaced(spelled, " per ", "/");
   spelled = replaced(replaced(spelled, "_", "/"), " / ", "/");
   if (spelled.ends_with('.')) spelled.pop_back();
   return unitFromSymbol(spelled);
 }
 
 NameAndUnit splitNameAndUnit(std::string_view heading) {
-  const std::string tidy = withSingleBlanks(heading);
-  if (const auto unit = readUnit(tidy)) {
-    const auto role = roleOfName(tidy);
+  const std::string written = withSingleBlanks(heading);
+  if (const auto unit = readUnit(written)) {
+    const auto role = roleOfName(written);
     if (!role || quantityOf(*role) == unit->quantity) {
-      return {tidy, std::string(withoutBrackets(tidy))};
+      return {written, std::string(withoutBrackets(written))};
     }
   }
+  const std::string tidy = withPlainBrackets(written);
   if (const auto found = inBrackets(tidy)) return *found;
   if (const auto found = behindSeparator(tidy)) return *found;
   // "Water Temp, °C (serial 1024)": a last bracket that holds no unit hides one before it.
@@ -110,7 +122,7 @@ NameAndUnit splitNameAndUnit(std::string_view heading) {
     const auto found = behindSeparator(trimmed(std::string_view(tidy).substr(0, open)));
     if (found) return {found->name + " " + tidy.substr(open), found->unit};
   }
-  return {tidy, {}};
+  return {written, {}};
 }
 
 std::string columnLabel(std::string_view name, std::size_t number) {

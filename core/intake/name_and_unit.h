@@ -18,9 +18,9 @@ struct NameAndUnit {
 };
 
 /// Takes the unit off a name: "Load (N)", "Load [N]", "Load / N", "Load, N", "Load_N", "Load N",
-/// "Kraft in N", "velocity_mm_s" ("mm/s"). Where no bracket marks it, a unit must be known and, if
-/// it is one letter or a word ("in", "min"), must suit what the name says. In square brackets any
-/// text is a unit.
+/// "Kraft in N", "Force.N.", "荷重（N）", "velocity_mm_s" ("mm/s"). Where no bracket marks it, a
+/// unit must be known and, if it is one letter or a word ("in", "min"), must suit what the name
+/// says. In square brackets any text is a unit.
 NameAndUnit splitNameAndUnit(std::string_view heading);
 
 /// The unit of a symbol as files write it: brackets taken off, "mm_s" and "mm/sec" understood too.

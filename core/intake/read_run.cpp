@@ -49,6 +49,10 @@ std::vector<Remark> remarksOf(const Layout& layout) {
     remarks.push_back(
         Remark{"zero-bytes-at-end", Severity::Warning, {}, layout.decoded.zeroBytesAtEnd, 0});
   }
+  if (layout.decoded.zeroBytesInside > 0) {
+    remarks.push_back(
+        Remark{"zero-bytes-inside", Severity::Warning, {}, layout.decoded.zeroBytesInside, 0});
+  }
   for (const std::size_t column : layout.dialect.settledByOthers) {
     if (column >= layout.table.columns.size()) continue;
     const std::string name = columnLabel(layout.table.columns[column].name, column + 1);

@@ -40,7 +40,37 @@ std::string_view withoutReturns(std::string_view line) {
   return line;
 }
 
+bool hasLoneReturn(std::string_view text) {
+  for (std::size_t at = text.find('\r'); at != text.npos; at = text.find('\r', at + 1)) {
+    const std::size_t next = text.find_first_not_of('\r', at);
+    if (next != text.npos && text[next] != '\n') return true;
+    if (next == text.npos) return false;
+    at = next;
+  }
+  return false;
+}
+
 }  // namespace
+
+std::optional<std::string> withOneLineEnd(std::string_view text) {
+  if (text.find('\n') == text.npos || !hasLoneReturn(text.substr(0, lineEndBytes))) {
+    return std::nullopt;
+  }
+  std::string even;
+  even.reserve(text.size());
+  bool quoted = false;
+  for (std::size_t i = 0; i < text.size(); ++i) {
+    quoted = quoted != (text[i] == '"');
+    if (text[i] != '\r' || quoted) {
+      even += text[i];
+      continue;
+    }
+    const std::size_t next = std::min(text.find_first_not_of('\r', i), text.size());
+    if (next == text.size() || text[next] != '\n') even.append(next - i, '\n');
+    i = next - 1;
+  }
+  return even;
+}
 
 LineEnd findLineEnd(std::string_view text) {
   const std::size_t first = text.find('\n');

@@ -29,6 +29,10 @@ struct LineEnd {
 /// By the first 64 KB, or by the first line end where that is further on.
 LineEnd findLineEnd(std::string_view text);
 
+/// The text with every line ended by LF, where its first 64 KB mix CR alone with other line ends
+/// (CR inside quotes stays); nothing where they do not.
+std::optional<std::string> withOneLineEnd(std::string_view text);
+
 /// Walks through a text line by line without copying.
 class LineReader {
  public:

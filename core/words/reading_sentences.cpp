@@ -65,6 +65,10 @@ constexpr Sentence rows[] = {
     {"zero-bytes-at-end",
      "The file ends in {count} zero bytes, as after a loss of power; they were left out.",
      "Look whether the end of the run is missing."},
+    {"zero-bytes-inside",
+     "The text holds {count} zero bytes, as some loggers pad their fields; they were read as "
+     "blanks.",
+     "Look whether rows are missing there."},
     {"thousands-marks",
      "Numbers of {column} were read with marks for thousands, because other columns show which "
      "mark is the decimal one.",

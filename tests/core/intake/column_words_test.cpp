@@ -39,6 +39,31 @@ TEST(ColumnWords, TheLastWordIsTheNoun) {
   EXPECT_EQ(roleOfName("Load cell temperature"), Role::Temperature);
 }
 
+TEST(ColumnWords, BeforeALinkingWordStandsTheNoun) {
+  EXPECT_EQ(roleOfName("Force de compression"), Role::Force);
+  EXPECT_EQ(roleOfName("Vitesse de déplacement"), Role::Velocity);
+  EXPECT_EQ(roleOfName("Température du capteur de force"), Role::Temperature);
+  EXPECT_EQ(roleOfName("Geschwindigkeit des Kolbenwegs"), Role::Velocity);
+  EXPECT_EQ(roleOfName("Speed of the position sensor"), Role::Velocity);
+  EXPECT_EQ(roleOfName("Célula de carga"), Role::Force);
+  EXPECT_EQ(roleOfName("Aceleração no curso"), Role::Other);
+}
+
+TEST(ColumnWords, WordsThatOnlyDescribeGiveWay) {
+  EXPECT_EQ(roleOfName("Force compression"), Role::Force);
+  EXPECT_EQ(roleOfName("Rebound force"), Role::Force);
+  EXPECT_EQ(roleOfName("Compression"), Role::Displacement);
+}
+
+TEST(ColumnWords, OfJapaneseAndChineseWordsTheLongerOneCounts) {
+  EXPECT_EQ(roleOfName("力"), Role::Force);
+  EXPECT_EQ(roleOfName("圧力"), Role::Other);
+  EXPECT_EQ(roleOfName("压力"), Role::Other);
+  EXPECT_EQ(roleOfName("加速度"), Role::Other);
+  EXPECT_EQ(roleOfName("変位速度"), Role::Velocity);
+  EXPECT_EQ(roleOfName("油温度"), Role::Temperature);
+}
+
 TEST(ColumnWords, OtherQuantitiesAreNamedAsSuchAndUnknownWordsNotAtAll) {
   for (const char* name : {"Pressure", "Sample", "Cycle count", "Gasdruck", "Power", "Index"})
     EXPECT_EQ(roleOfName(name), Role::Other) << name;
@@ -67,6 +92,10 @@ TEST(ColumnWords, OrInALineAboutSigns) {
   EXPECT_EQ(directionOfLine("rebound negative, bump positive"), Direction::Compression);
   EXPECT_EQ(directionOfLine("Load compression positive"), std::nullopt);
   EXPECT_EQ(directionOfLine("Position compression stage"), std::nullopt);
+  EXPECT_EQ(directionOfLine("Déplacement : compression positive"), Direction::Compression);
+  EXPECT_EQ(directionOfLine("変位: 圧縮が正"), Direction::Compression);
+  EXPECT_EQ(directionOfLine("位移: 拉伸为正"), Direction::Rebound);
+  EXPECT_EQ(directionOfLine("荷重: 圧縮が正"), std::nullopt);
 }
 
 }  // namespace

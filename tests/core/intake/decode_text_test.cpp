@@ -128,8 +128,17 @@ TEST(DecodeText, TextThatOnlyBeginsLikeThemIsText) {
   EXPECT_EQ(codeOf("%Pd 1"), "none");
 }
 
-TEST(DecodeText, ZerosAmongTheFirstBytesAreBinary) {
-  EXPECT_EQ(codeOf("1,2\0,3\n4,5,6\n"sv), "file-is-binary");
+TEST(DecodeText, ZerosThatPadFieldsAreBlanksAndCounted) {
+  const auto decoded = decodeText("1,2\0\0,3\n4,5,6\n\0"sv, std::nullopt);
+  ASSERT_TRUE(decoded);
+  EXPECT_EQ(decoded.value().text(), "1,2  ,3\n4,5,6\n");
+  EXPECT_EQ(decoded.value().zeroBytesInside, 2);
+  EXPECT_EQ(decoded.value().zeroBytesAtEnd, 1);
+}
+
+TEST(DecodeText, ManyZerosOrOtherControlCharactersAreBinary) {
+  EXPECT_EQ(codeOf("1,2\0\x01,3\n4,5,6\n"sv), "file-is-binary");
+  EXPECT_EQ(codeOf("1\0\0\0,2\0\0"sv), "file-is-binary");
   EXPECT_EQ(codeOf(std::string(100, '\0')), "file-is-binary");
   EXPECT_EQ(codeOf("\0"sv), "file-is-binary");
 }
