@@ -32,7 +32,8 @@ struct Window {
   double value = nan;
   double squares = 0;    // Σ weights², times points per independent sample
   double samples = 0;    // independent samples in the window
-  double residual2 = 0;  // N², variance of a grid point about the fit
+  double residual2 = 0;  // N², variance of an independent sample about the fit
+  double residualDof = 0;
 
   double valueOf(std::span<const double> force) const {
     double sum = 0;
@@ -107,12 +108,14 @@ std::optional<Window> bestWindow(const Loop& loop, double place, const GridStret
     return window.samples >= soundSamples;
   });
   const double noise2 = residualVariance(*telling, loop.force);
+  const double noiseDof = std::max(1.0, telling->samples - degree - 1);
   std::vector<Window> agreed;
   for (Window& window : windows) {
     if (!agrees(window, agreed, noise2)) break;
     agreed.push_back(std::move(window));
   }
   agreed.back().residual2 = noise2;
+  agreed.back().residualDof = noiseDof;
   return agreed.back();
 }
 
@@ -123,14 +126,13 @@ LoopFigure withScatter(const Window& window, const std::vector<Loop>& singles) {
     if (!std::isnan(value)) values.push_back(value);
   }
   const auto n = static_cast<double>(values.size());
+  const double noiseU = std::sqrt(window.residual2 * window.squares);
   if (values.size() < 2)
-    return {window.value,
-            std::sqrt(window.residual2 * window.squares),
-            std::max(1.0, window.samples - degree - 1)};
+    return {window.value, noiseU, window.residualDof, noiseU, window.residualDof};
   double mean = 0, squares = 0;
   for (const double value : values) mean += value / n;
   for (const double value : values) squares += (value - mean) * (value - mean);
-  return {window.value, std::sqrt(squares / (n - 1) / n), n - 1};
+  return {window.value, std::sqrt(squares / (n - 1) / n), n - 1, noiseU, window.residualDof};
 }
 
 }  // namespace
@@ -145,7 +147,7 @@ double closedValue(std::span<const double> grid, double place, int halfWidth) {
 
 LoopFigure forceAtPlace(const Block& block, double place, const GridStretch& inside) {
   const auto window = bestWindow(block.loop, place, inside);
-  if (!window) return {nan, nan, 0};
+  if (!window) return {nan, nan, 0, nan, 0};
   return withScatter(*window, block.singles);
 }
 

@@ -17,6 +17,8 @@ struct LoopFigure {
   double value = 0;  ///< N, signed as in the loop; NaN where hidden
   double u = 0;      ///< N, standard uncertainty of the mean, from cycle to cycle
   double dof = 0;
+  double noiseU = 0;  ///< N, standard uncertainty of the mean by the samples about the fit alone
+  double noiseDof = 0;
 };
 
 /// Value of the closed grid at a place between its points, by the local polynomial of degree 4 over

@@ -89,7 +89,7 @@ double largestPlace(const Loop& loop, Direction direction) {
 
 LoopFigure largestFigure(const Block& block, Direction direction) {
   const double place = largestPlace(block.loop, direction);
-  if (std::isnan(place)) return {nan, nan, 0};
+  if (std::isnan(place)) return {nan, nan, 0, nan, 0};
   return forceAtPlace(block, place, halfOf(block.loop, direction));
 }
 
@@ -106,6 +106,8 @@ Reading readDirection(const Block& block, Direction direction, double energy) {
   reading.force = sign * force.value;
   reading.forceU = force.u;
   reading.forceDof = force.dof;
+  reading.noiseU = force.noiseU;
+  reading.noiseDof = force.noiseDof;
   const bool peakIsLargest = sign * force.value >= sign * largest.value;
   reading.largestForce = peakIsLargest ? reading.force : sign * largest.value;
   reading.largestForceU = peakIsLargest ? force.u : largest.u;

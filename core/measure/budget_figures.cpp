@@ -6,11 +6,12 @@
 #include "core/curves/force_at.h"
 #include "core/identify/gas_and_friction.h"
 #include "core/uncertainty/figure_budgets.h"
+#include "core/uncertainty/pooled_scatter.h"
 
 namespace dampwright {
 namespace {
 
-TypeA pooledScatter(const Measurement& measurement) {
+TypeA scatterPercent(const Measurement& measurement) {
   const double slowSpeed = IdentifyOptions{}.slowSpeed;
   std::vector<Reading> readings;
   for (const Curve* curve : {&measurement.compression, &measurement.rebound}) {
@@ -19,6 +20,44 @@ TypeA pooledScatter(const Measurement& measurement) {
     }
   }
   return pooledTypeA(readings);
+}
+
+/// Which of a reading's two forces is pooled, and where its type A goes.
+struct Pooling {
+  double Reading::*force;
+  double Reading::*u;
+  double Reading::*cyclesU;
+  double Reading::*cyclesDof;
+};
+constexpr Pooling atPeak{&Reading::force, &Reading::forceU, &Reading::cyclesU, &Reading::cyclesDof};
+constexpr Pooling largest{&Reading::largestForce,
+                          &Reading::largestForceU,
+                          &Reading::largestCyclesU,
+                          &Reading::largestCyclesDof};
+
+std::vector<CurvePoint*> pointsOf(Measurement& measurement) {
+  std::vector<CurvePoint*> points;
+  for (Curve* curve : {&measurement.compression, &measurement.rebound}) {
+    for (CurvePoint& point : curve->points) points.push_back(&point);
+  }
+  return points;
+}
+
+void poolScatter(Measurement& measurement, const Pooling& pooling) {
+  std::vector<Scatter> means;
+  const std::vector<CurvePoint*> points = pointsOf(measurement);
+  for (const CurvePoint* point : points) {
+    const Reading& reading = point->reading;
+    const bool alone = measurement.blocks[point->block].block.singles.size() < 2;
+    const double cycles = alone ? 1 : reading.forceDof + 1;
+    means.push_back(
+        {reading.*pooling.force, cycles, reading.*pooling.u, reading.noiseU, reading.noiseDof});
+  }
+  const std::vector<TypeA> pooled = pooledScatter(means);
+  for (std::size_t i = 0; i < points.size(); ++i) {
+    points[i]->reading.*pooling.cyclesU = pooled[i].u;
+    points[i]->reading.*pooling.cyclesDof = pooled[i].dof;
+  }
 }
 
 /// Adds lines to the budget; what they combine to.
@@ -40,7 +79,7 @@ void budgetPoint(Measurement& measurement, const Curve& curve, CurvePoint& point
   figure.slope = slopeAt(curve, point, CurveFigure::Force);
   figure.velocity = reading.peakVelocity;
   figure.amplitude = 0.5 * point.stroke;
-  figure.cyclesPercent = {measurement.typeAPercent, measurement.typeADof};
+  figure.cycles = {reading.cyclesU, reading.cyclesDof};
   const Combined asMeasured = book(measurement, forceBudget(figure, measurement.rig));
   reading.forceTotalU = asMeasured.u;
   reading.forceTotalDof = asMeasured.dof;
@@ -72,9 +111,11 @@ std::string budgetQuantity(Direction direction, std::string_view figure, std::si
 }
 
 Measurement withBudget(Measurement measurement) {
-  const TypeA scatter = pooledScatter(measurement);
+  const TypeA scatter = scatterPercent(measurement);
   measurement.typeAPercent = scatter.u;
   measurement.typeADof = scatter.dof;
+  poolScatter(measurement, atPeak);
+  poolScatter(measurement, largest);
   const Combined gas = book(measurement, gasBudget(measurement.gas, measurement.rig));
   measurement.gas.totalU = gas.u;
   measurement.gas.totalDof = gas.dof;

@@ -48,6 +48,7 @@ void describe(Fields& io, std::string_view velocityKey, Reading& reading) {
   const Known read = reading.isRead() ? Known::Yes : Known::No;
   describe(io, "force_n", {reading.forceTotalU, reading.forceTotalDof}, read);
   describe(io, "force_n_cycles", {reading.forceU, reading.forceDof}, read);
+  describe(io, "force_n_pooled", {reading.cyclesU, reading.cyclesDof}, read);
   io.number("damping_force_n", reading.dampingForce);
   describe(io,
            "damping_force_n",
@@ -55,6 +56,7 @@ void describe(Fields& io, std::string_view velocityKey, Reading& reading) {
            known(reading.dampingForce));
   io.number("largest_force_n", reading.largestForce);
   io.number("largest_force_n_cycles_u", reading.largestForceU);
+  describe(io, "largest_force_n_pooled", {reading.largestCyclesU, reading.largestCyclesDof}, read);
   io.number("energy_j", reading.energy);
 }
 

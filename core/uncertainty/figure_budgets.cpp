@@ -43,7 +43,7 @@ class Lines {
 
 std::vector<BudgetLine> forceBudget(const ForceFigure& figure, const RigAccuracy& rig) {
   Lines lines(figure.quantity);
-  lines.add("cycles", ofPercent(figure.cyclesPercent.u, figure.force), figure.cyclesPercent.dof);
+  lines.add("cycles", figure.cycles.u, figure.cycles.dof);
   lines.addLoadCell(rig.loadCell, figure.force);
   const double perRelativeSpeed = std::abs(figure.slope * figure.velocity);
   if (figure.amplitude > 0) {

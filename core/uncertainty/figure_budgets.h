@@ -8,16 +8,11 @@
 #include "core/identify/gas.h"
 #include "core/rig/rig_accuracy.h"
 #include "core/uncertainty/budget.h"
+#include "core/uncertainty/type_a.h"
 
 // The budget of each kind of figure. Parts that are unknown or nothing have no line. Limits of
 // error are rectangular, u = a/√3, with infinite degrees of freedom.
 namespace dampwright {
-
-/// A standard uncertainty with its degrees of freedom.
-struct TypeA {
-  double u = 0;    ///< in the unit that its place names
-  double dof = 0;  ///< 0: not known
-};
 
 /// A force read or interpolated at a speed, as its budget sees it.
 struct ForceFigure {
@@ -26,12 +21,12 @@ struct ForceFigure {
   double slope = 0;                ///< N·s/m, local dF/dv of the curve
   double velocity = 0;             ///< m/s, magnitude
   double amplitude = 0;            ///< m, half the stroke; 0 where unknown
-  TypeA cyclesPercent{};           ///< %, of force, see pooledTypeA
+  TypeA cycles{};                  ///< N, of this mean force, see pooledScatter
   TypeA gas{};                ///< N, of the gas that was taken off; u 0 for a force as measured
   double interpolationU = 0;  ///< N, |cubic − chosen law|/√3; 0 at a measured speed
 };
 
-/// Lines: cycles (percent of force), load cell (reading and capacity limits), displacement and
+/// Lines: cycles, load cell (reading and capacity limits), displacement and
 /// clock (|slope|·v times u_x/X and u_clock), gas, zero, remount (percent of force), interpolation.
 /// @return lines whose combine() is the figure's standard uncertainty
 std::vector<BudgetLine> forceBudget(const ForceFigure& figure, const RigAccuracy& rig);
@@ -48,7 +43,7 @@ std::vector<BudgetLine> frictionBudget(const Friction& friction,
                                        FrictionKind kind,
                                        const RigAccuracy& rig);
 
-/// Cycle-to-cycle scatter of one averaged peak force in percent of force, pooled over readings:
+/// For the eye: cycle-to-cycle scatter of one averaged peak force in percent, pooled over readings:
 /// p² = Σν(u/F)²/Σν, ν = Σν. Readings below 5 % of the largest force are left out, because a
 /// percentage of a force near zero says nothing; dof is 0 where no reading has any.
 /// @return u in %

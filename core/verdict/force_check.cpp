@@ -1,5 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include <algorithm>
 #include <array>
+#include <cmath>
 
 #include "core/curves/force_at.h"
 #include "core/uncertainty/figure_budgets.h"
@@ -35,22 +37,17 @@ std::function<double(double)> lawOf(const Measurement& measurement,
   return [law, added](double velocity) { return law->at(velocity) + added; };
 }
 
-// Cycle-to-cycle scatter in percent, pooled over all points; of the largest ordinates their own.
-TypeA scatterOf(const Measurement& measurement, CurveFigure figure) {
-  if (figure != CurveFigure::LargestForce) return {measurement.typeAPercent, measurement.typeADof};
-  std::vector<Reading> ordinates;
-  for (const Direction direction : {Direction::Compression, Direction::Rebound}) {
-    for (const CurvePoint& point : measurement.curve(direction).points) {
-      Reading reading = point.reading;
-      reading.force = reading.largestForce;
-      reading.forceU = reading.largestForceU;
-      ordinates.push_back(reading);
-    }
-  }
-  return pooledTypeA(ordinates);
+// Cycle-to-cycle scatter of the nearest point; of a larger force than there, its percentage.
+TypeA scatterOf(const Reading& nearest, double force, CurveFigure figure) {
+  const bool ordinate = figure == CurveFigure::LargestForce;
+  const double there = std::abs(ordinate ? nearest.largestForce : nearest.force);
+  const double growth = there > 0 ? std::max(1.0, std::abs(force) / there) : 1;
+  return ordinate ? TypeA{growth * nearest.largestCyclesU, nearest.largestCyclesDof}
+                  : TypeA{growth * nearest.cyclesU, nearest.cyclesDof};
 }
 
 std::vector<BudgetLine> budgetOf(const Measurement& measurement,
+                                 const Reading& nearest,
                                  const ForceAtSpeed& at,
                                  const ForceQuery& query) {
   ForceFigure figure;
@@ -58,7 +55,7 @@ std::vector<BudgetLine> budgetOf(const Measurement& measurement,
   figure.slope = at.slope;
   figure.velocity = query.speed;
   figure.amplitude = at.stroke / 2;
-  figure.cyclesPercent = scatterOf(measurement, query.figure);
+  figure.cycles = scatterOf(nearest, at.force, query.figure);
   if (query.figure == CurveFigure::DampingForce)
     figure.gas = {measurement.gas.forceU, measurement.gas.forceDof};
   figure.interpolationU = at.uInterpolation;
@@ -99,7 +96,7 @@ Figure force(const Measurement& measurement, const Limits& limits, const Check& 
   const Block& block = measurement.blocks[curve.points[at.nearest].block].block;
   Figure figure;
   figure.value = at.force;
-  figure.budget = budgetOf(measurement, at, query);
+  figure.budget = budgetOf(measurement, curve.points[at.nearest].reading, at, query);
   figure.temperature = block.temperature;
   figure.waveform = block.kind;
   figure.remarks = remarksOf(at, query);

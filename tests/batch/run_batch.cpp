@@ -74,10 +74,8 @@ std::string linearDamperRun(double coefficient) {
 
 Measurement storedMeasurement() {
   Measurement made = madeMeasurement();
-  addPoint(made, Direction::Rebound, {0.3, 600});
-  addPoint(made, Direction::Compression, {0.3, 600});
-  made.typeAPercent = 1;
-  made.typeADof = 1000;
+  addPoint(made, Direction::Rebound, {0.3, 600, 0.05, 0, 6, 1000});
+  addPoint(made, Direction::Compression, {0.3, 600, 0.05, 0, 6, 1000});
   return made;
 }
 

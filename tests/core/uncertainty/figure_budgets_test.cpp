@@ -52,7 +52,7 @@ TEST(ForceBudget, EveryPartHasItsLine) {
                                   .slope = 2000,
                                   .velocity = 0.3,
                                   .amplitude = 0.025,
-                                  .cyclesPercent = {0.1, 30},
+                                  .cycles = {1, 30},
                                   .gas = {0.4, 200},
                                   .interpolationU = 1.5},
                                  rig);
@@ -67,7 +67,7 @@ TEST(ForceBudget, EveryPartHasItsLine) {
 }
 
 TEST(ForceBudget, UnknownScatterLeavesNoLine) {
-  EXPECT_TRUE(forceBudget({.force = 1000, .cyclesPercent = {0, 0}}, {}).empty());
+  EXPECT_TRUE(forceBudget({.force = 1000, .cycles = {0, 0}}, {}).empty());
 }
 
 TEST(GasBudget, NothingWhileTheGasIsNotDetermined) {

@@ -16,10 +16,8 @@ Measurement straight() {
   Measurement made = madeMeasurement();
   for (const double velocity : {0.1, 0.2, 0.4, 0.8}) {
     const double force = 2000 * velocity;
-    addPoint(made, Direction::Rebound, {velocity, force, 0.05, 0, scatter * force});
+    addPoint(made, Direction::Rebound, {velocity, force, 0.05, 0, scatter * force, 16});
   }
-  made.typeAPercent = 100 * scatter;
-  made.typeADof = 16;
   return made;
 }
 

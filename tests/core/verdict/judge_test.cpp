@@ -86,10 +86,10 @@ TEST(Judge, AForceOnTheLimitIsTooCloseToCall) {
 TEST(Judge, CoverageComesFromTheDegreesOfFreedomAndStandsBesideEachCheck) {
   const Verdict verdict = judge(tested(1150, 235), workshopLimits());
   const CheckVerdict& check = verdict.checks[0];
-  // pooled over both directions: 1 % with 8 degrees of freedom; t95(8) = 2.306, GUM table G.2
+  // 1 % with 4 degrees of freedom; t95(4) = 2.776, GUM table G.2
   EXPECT_NEAR(check.standardUncertainty, 11.5, 1e-9);
-  EXPECT_NEAR(check.dof, 8, 1e-9);
-  EXPECT_NEAR(check.coverageFactor, 2.306, 5e-4);
+  EXPECT_NEAR(check.dof, 4, 1e-9);
+  EXPECT_NEAR(check.coverageFactor, 2.776, 5e-4);
   EXPECT_DOUBLE_EQ(check.expandedUncertainty, check.coverageFactor * check.standardUncertainty);
   ASSERT_EQ(check.budget.size(), 1u);
   EXPECT_EQ(check.budget[0].part, "cycles");

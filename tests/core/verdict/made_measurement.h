@@ -9,13 +9,14 @@
 /// A measurement put together by hand, so that a test knows every figure of it.
 namespace dampwright {
 
-/// One point: what was read at a speed. Type A is `typeA` N with 4 degrees of freedom.
+/// One point: what was read at a speed. Type A is `typeA` N, by itself with 4 degrees of freedom.
 struct MadePoint {
   double velocity = 0;  ///< m/s
   double force = 0;     ///< N
   double stroke = 0.05;
   double largest = 0;  ///< N, 0: as force
-  double typeA = 1;    ///< N
+  double typeA = 1;    ///< N, of the point itself and pooled
+  double pooledDof = 4;
 };
 
 inline void addPoint(Measurement& measurement, Direction direction, const MadePoint& point) {
@@ -33,10 +34,14 @@ inline void addPoint(Measurement& measurement, Direction direction, const MadePo
   reading.force = point.force;
   reading.forceU = point.typeA;
   reading.forceDof = 4;
+  reading.cyclesU = point.typeA;
+  reading.cyclesDof = point.pooledDof;
   reading.forceTotalU = point.typeA;
   reading.forceTotalDof = 4;
   reading.largestForce = point.largest > 0 ? point.largest : point.force;
   reading.largestForceU = point.typeA;
+  reading.largestCyclesU = point.typeA;
+  reading.largestCyclesDof = point.pooledDof;
   (direction == Direction::Compression ? made.compression : made.rebound) = reading;
   Curve& curve =
       direction == Direction::Compression ? measurement.compression : measurement.rebound;
