@@ -48,7 +48,26 @@ MatrixXd jacobian(const Law& law, std::span<const ScatteredPoint> points, const 
   return j;
 }
 
-/// The best fit of all regions, and whether a parameter stands at the edge of all of them.
+/// Parameters at a point of the law's chart.
+VectorXd fromChart(const Law& law, const VectorXd& q) {
+  return vectorOf(lawParameters(law, spanOf(q)));
+}
+
+MatrixXd chartJacobian(const Law& law, std::span<const ScatteredPoint> points, const VectorXd& q) {
+  const MatrixXd byParameters = jacobian(law, points, fromChart(law, q));
+  if (law.chart == nullptr) return byParameters;
+  MatrixXd derivatives(q.size(), q.size());
+  const auto rows = law.chart->derivatives(spanOf(q));
+  for (Index i = 0; i < q.size(); ++i) {
+    for (Index k = 0; k < q.size(); ++k) {
+      derivatives(i, k) = rows[static_cast<std::size_t>(i)][static_cast<std::size_t>(k)];
+    }
+  }
+  return byParameters * derivatives;
+}
+
+/// The best fit of all regions in the law's chart, and whether a parameter stands at the edge of
+/// all of them.
 struct BestFit {
   FitSummary summary;
   bool atEdge = false;
@@ -73,12 +92,12 @@ BestFit bestFit(const Law& law,
                 std::span<const LawRegion> regions) {
   BestFit best;
   for (const LawRegion& region : regions) {
-    const FitSummary found =
-        fitLeastSquares({[&](const VectorXd& at) { return residuals(law, points, at); },
-                         [&](const VectorXd& at) { return jacobian(law, points, at); },
-                         vectorOf(region.lower),
-                         vectorOf(region.upper)},
-                        vectorOf(region.start));
+    const FitSummary found = fitLeastSquares(
+        {[&](const VectorXd& q) { return residuals(law, points, fromChart(law, q)); },
+         [&](const VectorXd& q) { return chartJacobian(law, points, q); },
+         vectorOf(region.lower),
+         vectorOf(region.upper)},
+        vectorOf(region.start));
     const bool better = found.usable() && (!best.summary.usable() || found.rss < best.summary.rss);
     if (best.summary.parameters.size() == 0 || better) best.summary = found;
   }
@@ -95,7 +114,8 @@ double meanVariance(std::span<const ScatteredPoint> points) {
 VectorXd standardErrors(const Law& law,
                         std::span<const ScatteredPoint> points,
                         const FitSummary& found) {
-  const auto covariance = unscaledCovariance(jacobian(law, points, found.parameters));
+  const VectorXd at = fromChart(law, found.parameters);
+  const auto covariance = unscaledCovariance(jacobian(law, points, at));
   if (!found.usable() || !covariance) return VectorXd::Constant(found.parameters.size(), nan);
   const double dof = static_cast<double>(points.size()) - static_cast<double>(covariance->rows());
   const double ofResiduals = dof > 0 ? found.rss / dof : 0;
@@ -125,13 +145,12 @@ FittedLaw fitLaw(const Law& law, std::span<const ScatteredPoint> points) {
   const BestFit best = bestFit(law, points, regions);
   FittedLaw fitted = notFitted(law, codeOf(best.summary.status));
   if (best.summary.status == FitStatus::AtBound && !best.atEdge) fitted.status = "converged";
+  const VectorXd values = fromChart(law, best.summary.parameters);
   const VectorXd errors = standardErrors(law, points, best.summary);
   for (std::size_t j = 0; j < law.parameters.size(); ++j) {
     const auto k = static_cast<Index>(j);
-    fitted.parameters.push_back({std::string(law.parameters[j].name),
-                                 best.summary.parameters[k],
-                                 errors[k],
-                                 law.parameters[j].quantity});
+    fitted.parameters.push_back(
+        {std::string(law.parameters[j].name), values[k], errors[k], law.parameters[j].quantity});
   }
   const auto count = static_cast<double>(points.size());
   fitted.rms = std::sqrt(best.summary.rss / count);

@@ -17,7 +17,7 @@ struct FittedParameter {
 
 /// One damping law fitted to one direction's points (damping force less dry friction).
 struct FittedLaw {
-  std::string law;  ///< linear | two-slope
+  std::string law;  ///< linear | power | two-slope | smooth | bleed and blow-off
   bool chosen = false;
   std::vector<FittedParameter> parameters;  ///< empty where it was not fitted
   double rms = 0;                           ///< N, residual; NaN where it was not fitted

@@ -17,9 +17,10 @@ constexpr double infinity = std::numeric_limits<double>::infinity();
 constexpr KeyUnit plain{"", Quantity::None, 1, 1, nan};
 
 // A longer ending stands before a shorter one that it ends with.
-constexpr std::array<KeyUnit, 12> units{{
+constexpr std::array<KeyUnit, 13> units{{
     {"dof", Quantity::None, 1, 1, infinity},
     {"aicc", Quantity::None, 1, 1, infinity},
+    {"_mm_s_per_sqrt_n", Quantity::None, 1, 1000, nan},
     {"_n_per_mm", Quantity::Stiffness, 1000, 1, nan},
     {"_n_s_per_m", Quantity::Damping, 1, 1, nan},
     {"_mm_s", Quantity::Velocity, 1, 1000, nan},

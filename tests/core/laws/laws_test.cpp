@@ -1,8 +1,10 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include <gtest/gtest.h>
 
+#include <algorithm>
 #include <cmath>
 #include <set>
+#include <string_view>
 
 #include "core/laws/law.h"
 
@@ -17,6 +19,10 @@ const std::vector<LawPoint> points = [] {
   }
   return made;
 }();
+
+std::vector<double> startOf(const Law& law, const LawRegion& region) {
+  return lawParameters(law, region.start);
+}
 
 TEST(AllLaws, HaveTheirOwnNamesAndAreFoundByThem) {
   std::set<std::string_view> names;
@@ -38,7 +44,7 @@ TEST(AllLaws, StandFromTheSimplestToTheRichest) {
 TEST(AllLaws, HaveNoForceAtStandstill) {
   for (const Law* law : allLaws()) {
     for (const LawRegion& region : law->regions(points)) {
-      EXPECT_EQ(law->force(region.start, 0), 0) << law->name;
+      EXPECT_EQ(law->force(startOf(*law, region), 0), 0) << law->name;
     }
   }
 }
@@ -60,20 +66,23 @@ TEST(AllLaws, StartInsideTheirBounds) {
 TEST(AllLaws, DerivativesAgreeWithFiniteDifferences) {
   for (const Law* law : allLaws()) {
     for (const LawRegion& region : law->regions(points)) {
+      std::vector<double> at = startOf(*law, region);
+      for (double& value : at) value = std::max(value, 1e-3);  // a start may stand at 0
       for (const double v : {0.013, 0.07, 0.33, 0.9}) {
-        const double step = 1e-6;  // of the value: both laws are piecewise linear, rounding decides
+        const double step = 1e-5;  // of the value: rounding 1e-11, curvature 1e-10
         const double slope =
-            (law->force(region.start, v * (1 + step)) - law->force(region.start, v * (1 - step))) /
-            (2 * step * v);
-        EXPECT_NEAR(law->slope(region.start, v), slope, 1e-6 * std::abs(slope)) << law->name;
-        for (std::size_t j = 0; j < region.start.size(); ++j) {
-          auto above = region.start;
-          auto below = region.start;
+            (law->force(at, v * (1 + step)) - law->force(at, v * (1 - step))) / (2 * step * v);
+        EXPECT_NEAR(law->slope(at, v), slope, 1e-6 * std::abs(slope)) << law->name;
+        for (std::size_t j = 0; j < at.size(); ++j) {
+          auto above = at;
+          auto below = at;
           above[j] *= 1 + step;
           below[j] *= 1 - step;
           const double derivative =
               (law->force(above, v) - law->force(below, v)) / (above[j] - below[j]);
-          EXPECT_NEAR(law->gradient(region.start, v)[j], derivative, 1e-6 * std::abs(derivative))
+          EXPECT_NEAR(law->gradient(at, v)[j],
+                      derivative,
+                      1e-6 * std::abs(derivative) + 1e-9 * law->force(at, v) / at[j])
               << law->name << " parameter " << j << " at " << v;
         }
       }
@@ -81,22 +90,70 @@ TEST(AllLaws, DerivativesAgreeWithFiniteDifferences) {
   }
 }
 
-TEST(AllLaws, KneeIsWhereTheTangentAtRestMeetsTheAsymptote) {
+TEST(AllLaws, ChartDerivativesAgreeWithFiniteDifferences) {
   for (const Law* law : allLaws()) {
+    if (law->chart == nullptr) continue;
+    for (const LawRegion& region : law->regions(points)) {
+      const auto derivatives = law->chart->derivatives(region.start);
+      for (std::size_t j = 0; j < region.start.size(); ++j) {
+        auto above = region.start;
+        auto below = region.start;
+        above[j] *= 1 + 1e-5;
+        below[j] *= 1 - 1e-5;
+        const auto high = lawParameters(*law, above), low = lawParameters(*law, below);
+        for (std::size_t i = 0; i < region.start.size(); ++i) {
+          const double difference = (high[i] - low[i]) / (above[j] - below[j]);
+          EXPECT_NEAR(derivatives[i][j], difference, 1e-8 * std::abs(difference)) << i << " " << j;
+        }
+      }
+    }
+  }
+}
+
+TEST(AllLaws, KneeIsWhereTheTangentAtRestMeetsTheAsymptote) {
+  for (const std::string_view name : {"two-slope", "smooth"}) {
+    const Law* law = findLaw(name);
     for (const LawRegion& region : law->regions(points)) {
       const double far = 1e3;  // m/s, beyond any bend
       const double tangent = law->slope(region.start, 0);
       const double asymptote = law->slope(region.start, far);
-      const auto knee = law->knee(region.start);
-      if (!knee) {
-        EXPECT_EQ(tangent, asymptote) << law->name;
-        continue;
-      }
       const double meeting =
           (law->force(region.start, far) - asymptote * far) / (tangent - asymptote);
-      EXPECT_NEAR(*knee, meeting, 1e-9 * far / tangent) << law->name;
+      EXPECT_NEAR(*law->knee(region.start), meeting, 1e-9 * far / tangent) << name;
     }
   }
+}
+
+TEST(AllLaws, WithoutATangentAtRestOrAnAsymptoteThereIsNoKnee) {
+  EXPECT_FALSE(findLaw("linear")->knee(std::vector<double>{1500}));
+  EXPECT_FALSE(findLaw("power")->knee(std::vector<double>{1500, 0.7}));
+}
+
+TEST(BleedAndBlowOff, TheKneeIsTheSpeedAtWhichTheValveOpens) {
+  const Law* law = findLaw("bleed and blow-off");
+  const std::vector<double> valve = {0.006, 400, 900};
+  const double knee = *law->knee(valve);
+  EXPECT_DOUBLE_EQ(knee, 0.006 * 20);
+  EXPECT_NEAR(law->force(valve, knee), 400, 1e-9);
+}
+
+TEST(BleedAndBlowOff, ItsForceBringsItsSpeedBack) {
+  const Law* law = findLaw("bleed and blow-off");
+  for (const double bleed : {1e-6, 0.002, 0.02}) {
+    const std::vector<double> valve = {bleed, 400, 900};
+    for (const double v : {0.001, 0.05, 0.2, 1.5}) {
+      const double force = law->force(valve, v);
+      const double back = bleed * std::sqrt(force) + std::max(0.0, force - 400) / 900;
+      EXPECT_NEAR(back, v, 1e-12) << bleed;
+    }
+  }
+}
+
+TEST(Power, StandsForCoulombViscousAndOrifice) {
+  const Law* law = findLaw("power");
+  EXPECT_DOUBLE_EQ(law->force(std::vector<double>{800, 2}, 0.5), 200);
+  EXPECT_DOUBLE_EQ(law->force(std::vector<double>{800, 1}, 0.5), 400);
+  EXPECT_DOUBLE_EQ(law->force(std::vector<double>{800, 0.5}, 0.25), 400);
 }
 
 TEST(TwoSlope, TheRegionThatHoldsTheKneeStartsNearTheTruth) {

@@ -18,6 +18,7 @@ TEST(KeyUnit, TheEndOfAKeySaysTheUnit) {
   EXPECT_EQ(unitOfKey("force_delay_u_ms").toSi(0.5), 0.0005);
   EXPECT_EQ(unitOfKey("pressure_bar").toSi(20), 2e6);
   EXPECT_DOUBLE_EQ(unitOfKey("phase_lag_deg").toSi(180), std::acos(-1.0));
+  EXPECT_EQ(unitOfKey("bleed_mm_s_per_sqrt_n").toSi(5), 0.005);
   EXPECT_EQ(unitOfKey("force_n").toSi(7), 7);
   EXPECT_EQ(unitOfKey("temperature_c").toSi(21), 21);
   EXPECT_EQ(unitOfKey("mid").toSi(3), 3);
