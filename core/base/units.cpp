@@ -16,6 +16,7 @@ struct Spelling {
 constexpr Unit second{"s", Quantity::Time, 1, 0};
 constexpr Unit millisecond{"ms", Quantity::Time, 1e-3, 0};
 constexpr Unit microsecond{"µs", Quantity::Time, 1e-6, 0};
+constexpr Unit nanosecond{"ns", Quantity::Time, 1e-9, 0};
 constexpr Unit minute{"min", Quantity::Time, 60, 0};
 constexpr Unit hour{"h", Quantity::Time, 3600, 0};
 constexpr Unit day{"d", Quantity::Time, 86400, 0};
@@ -56,6 +57,7 @@ constexpr auto spellings = std::to_array<Spelling>({
     {"μs", microsecond},
     {"us", microsecond},
     {"usec", microsecond},
+    {"ns", nanosecond},
     {"min", minute},
     {"minute", minute},
     {"minutes", minute},

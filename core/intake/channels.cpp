@@ -44,7 +44,13 @@ struct Guess {
 
 Guess timeUnit(std::span<const double> raw, const UnitHints& hints) {
   const double step = medianStep(raw);
-  for (const auto& [symbol, seconds] : {std::pair{"s", 1.0}, {"ms", 1e-3}, {"µs", 1e-6}}) {
+  // 30000 to 80000 days since 1900 are the years 1982 to 2119.
+  const Range range = rangeOf(raw);
+  const bool serialDay = range.low > 30000 && range.high < 80000 && range.span() < 7;
+  if (serialDay && plausibleStep(step * 86400, {std::nullopt, hints.sampleRate, {}, {}}))
+    return {"d"};
+  for (const auto& [symbol, seconds] :
+       {std::pair{"s", 1.0}, {"ms", 1e-3}, {"µs", 1e-6}, {"ns", 1e-9}}) {
     if (plausibleStep(step * seconds, hints)) return {symbol, !hints.sampleRate};
   }
   return {"s"};
@@ -91,7 +97,7 @@ std::string_view optionOf(Role role) {
 }
 
 std::string_view unitsOf(Role role) {
-  if (role == Role::Time) return "s, ms, µs, min";
+  if (role == Role::Time) return "s, ms, µs, ns, min, h, d";
   if (role == Role::Displacement) return "mm, cm, m, µm, in";
   if (role == Role::Force) return "N, kN, daN, kgf, lbf";
   return role == Role::Velocity ? "m/s, mm/s, cm/s, in/s" : "°C, °F, K";
@@ -105,6 +111,7 @@ Result<ChosenUnit> chooseUnit(Role role,
                               const std::optional<std::string>& asked,
                               const UnitHints& hints) {
   const Quantity quantity = quantityOf(role);
+  if (column.stamps != StampKind::None) return ChosenUnit{*readUnit("s"), "s"};
   if (asked) {
     const auto unit = readUnit(*asked);
     if (unit && unit->quantity == quantity) return ChosenUnit{*unit, *asked};

@@ -84,19 +84,40 @@ class ClockMaker {
     put(restarts, Remark{"clock-restarts", Severity::Note, {}});
   }
 
+  // Rows of one stamp are spread up to the next one. The first stamp may have been under way, and
+  // the last one not yet over: there the usual number of rows gives the step.
   void spreadRepeats() {
     const double step = medianStep(time_);
+    const std::size_t usual = usualRepeats();
     Count repeated;
     for (std::size_t i = 0; i < time_.size();) {
       std::size_t next = i + 1;
       while (next < time_.size() && time_[next] == time_[i]) repeated.add(rowOf(next++));
       const double rise = next < time_.size() ? time_[next] - time_[i] : step;
-      const double share = std::min(rise, step) / static_cast<double>(next - i);
-      for (std::size_t k = i + 1; k < next; ++k)
-        time_[k] = time_[i] + share * static_cast<double>(k - i);
+      const std::size_t rows = next - i;
+      const bool edge = (i == 0 || next == time_.size()) && rows < usual;
+      const double share = edge ? step / static_cast<double>(usual)
+                                : std::min(rise, step) / static_cast<double>(rows);
+      const double start = edge && i == 0 && next < time_.size()
+                               ? time_[next] - share * static_cast<double>(rows)
+                               : time_[i];
+      for (std::size_t k = i; k < next; ++k) time_[k] = start + share * static_cast<double>(k - i);
       i = next;
     }
     put(repeated, Remark{"repeated-stamps", Severity::Note, {}});
+  }
+
+  // Rows of one stamp, median of all but the first and the last stamp.
+  std::size_t usualRepeats() const {
+    std::vector<std::size_t> runs{0};
+    for (std::size_t i = 0; i < time_.size(); ++i) {
+      if (i > 0 && time_[i] != time_[i - 1]) runs.push_back(0);
+      ++runs.back();
+    }
+    if (runs.size() < 3) return 1;
+    const auto middle = runs.begin() + static_cast<std::ptrdiff_t>(runs.size() / 2);
+    std::nth_element(runs.begin() + 1, middle, runs.end() - 1);
+    return *middle;
   }
 
   void lookForGaps() {

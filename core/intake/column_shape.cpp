@@ -54,6 +54,14 @@ bool isClock(std::span<const double> values) {
          quantile(steps, 0.9) - quantile(steps, 0.1) < 0.5 * median;
 }
 
+bool countsRows(std::span<const double> values) {
+  values = start(values);
+  for (std::size_t i = 1; i < values.size(); ++i) {
+    if (values[i] - values[i - 1] != 1 || values[i] != std::floor(values[i])) return false;
+  }
+  return values.size() > 2;
+}
+
 bool isConstant(std::span<const double> values) {
   return std::all_of(values.begin(), values.end(), [&](double value) {
     return !std::isfinite(value) || value == values.front();

@@ -10,7 +10,10 @@ namespace dampwright {
 /// steps differ by less than half of the median one.
 bool isClock(std::span<const double> values);
 
-/// Moves at all.
+/// Whole numbers that rise by exactly one from row to row: a counter, no clock.
+bool countsRows(std::span<const double> values);
+
+/// Never moves.
 bool isConstant(std::span<const double> values);
 
 /// Root mean square of the second differences over that of the first: about ω·Δt for a clean

@@ -3,7 +3,9 @@
 
 #include <algorithm>
 #include <array>
+#include <functional>
 #include <map>
+#include <string>
 
 #include "core/intake/letters.h"
 
@@ -25,6 +27,12 @@ std::vector<std::string_view> rowsToJudge(const SampleLines& sample) {
   return rows;
 }
 
+bool isStamp(std::string_view cell) {
+  StampVotes votes;
+  votes.add(cell);
+  return votes.stamps() > 0;
+}
+
 struct RowCounts {
   int numbers = 0, texts = 0;
 };
@@ -32,7 +40,7 @@ struct RowCounts {
 RowCounts countsOf(const std::vector<Cell>& cells) {
   RowCounts counts;
   for (const Cell& cell : cells) {
-    if (lookAtNumber(cell.text).number) {
+    if (lookAtNumber(cell.text).number || splitUnit(cell.text) || isStamp(cell.text)) {
       ++counts.numbers;
     } else if (!isMissing(cell.text)) {
       ++counts.texts;
@@ -80,9 +88,43 @@ Split bestSplit(const std::vector<std::string_view>& rows, std::optional<char> a
   return best;
 }
 
+// What the cells of a column are: numbers, numbers with a unit, times of day, or text.
 struct ColumnVotes {
-  FormVotes form;
+  FormVotes form, formWithUnit;
+  StampVotes stamps;
+  std::map<std::string, int, std::less<>> units;
   int texts = 0, filled = 0;
+
+  void add(std::string_view cell) {
+    filled += cell.empty() ? 0 : 1;
+    const NumberLook look = lookAtNumber(cell);
+    form.add(look);
+    if (look.number || isMissing(cell)) return;
+    if (const auto split = splitUnit(cell)) {
+      formWithUnit.add(lookAtNumber(split->number));
+      ++units[std::string(split->unit)];
+      return;
+    }
+    const int before = stamps.stamps();
+    stamps.add(cell);
+    texts += stamps.stamps() == before ? 1 : 0;
+  }
+
+  bool areStamps() const {
+    return stamps.stamps() > form.numbers + formWithUnit.numbers && stamps.stamps() >= texts;
+  }
+  bool haveUnits() const {
+    return !areStamps() && formWithUnit.numbers > form.numbers && formWithUnit.numbers >= texts;
+  }
+  bool areNumbers() const {
+    if (areStamps() || haveUnits()) return true;
+    return form.numbers > 0 && form.numbers >= texts + stamps.stamps() + formWithUnit.numbers;
+  }
+  std::string unit() const {
+    if (!haveUnits()) return {};
+    return std::ranges::max_element(units, {}, [](const auto& each) { return each.second; })->first;
+  }
+  const FormVotes& votes() const { return haveUnits() ? formWithUnit : form; }
 };
 
 std::vector<ColumnVotes> votesOf(const std::vector<std::string_view>& rows, const Split& split) {
@@ -91,10 +133,7 @@ std::vector<ColumnVotes> votesOf(const std::vector<std::string_view>& rows, cons
     const auto cells = splitRow(row, split.delimiter);
     if (cells.size() != split.columns || countsOf(cells).numbers == 0) continue;
     for (std::size_t column = 0; column < cells.size(); ++column) {
-      const NumberLook look = lookAtNumber(cells[column].text);
-      votes[column].form.add(look);
-      votes[column].filled += cells[column].text.empty() ? 0 : 1;
-      votes[column].texts += look.number || isMissing(cells[column].text) ? 0 : 1;
+      votes[column].add(cells[column].text);
     }
   }
   return votes;
@@ -105,7 +144,7 @@ Dialect withFileDecimal(Dialect dialect, const std::vector<ColumnVotes>& votes) 
   int point = 0, comma = 0;
   for (std::size_t column = 0; column < votes.size(); ++column) {
     if (dialect.numeric[column] == 0) continue;
-    const FormVotes& form = votes[column].form;
+    const FormVotes& form = votes[column].votes();
     point += form.pointDecimal;
     comma += form.commaDecimal;
   }
@@ -129,7 +168,7 @@ Dialect withForms(Dialect dialect,
   const bool known = options.decimal || dialect.decimalProven;
   if (options.decimal) dialect.decimal = *options.decimal;
   for (std::size_t column = 0; column < votes.size(); ++column) {
-    const FormVotes& form = votes[column].form;
+    const FormVotes& form = votes[column].votes();
     const auto own = options.decimal ? std::nullopt : provenForm(form);
     NumberForm chosen = own.value_or(NumberForm{dialect.decimal, 0});
     if (!own) {
@@ -149,16 +188,39 @@ Dialect withForms(Dialect dialect,
   return dialect;
 }
 
+// "sep=;", as spreadsheets write it for each other.
+std::optional<char> delimiterNamedIn(const SampleLines& sample) {
+  if (sample.head.empty()) return std::nullopt;
+  const std::string line = lowered(sample.head.front().text);
+  const std::string_view text = trimmed(std::string_view(line).substr(line.starts_with('"')));
+  if (!text.starts_with("sep=") || text.size() < 5) return std::nullopt;
+  const bool known = std::ranges::find(delimiters, text[4]) != delimiters.end();
+  return known ? std::optional(text[4]) : std::nullopt;
+}
+
 Error noTable(const std::vector<std::string_view>& rows) {
   const std::string start(rows.empty() ? std::string_view{} : startOf(rows.front(), 40));
   return {"no-table", {{"start", withSingleBlanks(start)}}, {}};
+}
+
+std::string_view withoutUnit(std::string_view cell, std::string_view unit) {
+  return unit.empty() || !cell.ends_with(unit) ? cell
+                                               : trimmed(cell.substr(0, cell.size() - unit.size()));
+}
+
+// A value in whatever decimal mark.
+bool isValue(std::string_view cell, const Dialect& dialect, std::size_t column) {
+  const StampForm stamp = dialect.stamps[column];
+  if (stamp.kind != StampKind::None) return readStamp(cell, stamp).has_value();
+  return lookAtNumber(withoutUnit(cell, dialect.units[column])).number;
 }
 
 }  // namespace
 
 Result<Dialect> findDialect(const SampleLines& sample, const DialectOptions& options) {
   const auto rows = rowsToJudge(sample);
-  const Split split = bestSplit(rows, options.delimiter);
+  const Split split =
+      bestSplit(rows, options.delimiter ? options.delimiter : delimiterNamedIn(sample));
   if (split.columns == 0 || split.score <= 0) return noTable(rows);
   if (split.columns > mostColumns) {
     return Error{"too-many-columns",
@@ -171,13 +233,21 @@ Result<Dialect> findDialect(const SampleLines& sample, const DialectOptions& opt
   dialect.delimiter = split.delimiter;
   dialect.columns = split.columns;
   for (const ColumnVotes& column : votes) {
-    dialect.numeric.push_back(column.form.numbers > 0 && column.form.numbers >= column.texts);
+    dialect.numeric.push_back(column.areNumbers());
     dialect.filled.push_back(column.filled > 0);
+    dialect.units.push_back(column.unit());
+    dialect.stamps.push_back(column.areStamps() ? column.stamps.form() : StampForm{});
   }
   const auto numbers = std::count(dialect.numeric.begin(), dialect.numeric.end(), 1);
   if (numbers == 0) return noTable(rows);
   if (numbers == 1) return Error{"one-column", {}, {}};
   return withForms(withFileDecimal(std::move(dialect), votes), votes, options);
+}
+
+std::optional<double> readCell(std::string_view cell, const Dialect& dialect, std::size_t column) {
+  const StampForm stamp = dialect.stamps[column];
+  if (stamp.kind != StampKind::None) return readStamp(cell, stamp);
+  return parseNumber(withoutUnit(cell, dialect.units[column]), dialect.forms[column]);
 }
 
 bool isDataRow(const std::vector<Cell>& cells, const Dialect& dialect) {
@@ -188,7 +258,7 @@ bool isDataRow(const std::vector<Cell>& cells, const Dialect& dialect) {
     const bool extra = column >= dialect.columns || dialect.filled[column] == 0;
     if (extra && !text.empty()) return false;
     if (extra || dialect.numeric[column] == 0) continue;
-    const bool number = lookAtNumber(text).number;
+    const bool number = isValue(text, dialect, column);
     if (!number && !isMissing(text)) return false;
     numbers += number ? 1 : 0;
     ++wanted;

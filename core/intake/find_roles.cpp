@@ -88,8 +88,14 @@ struct Said {
   bool command = false;
 };
 
-Said saidBy(const NameAndUnit& heading) {
+Said saidBy(const ColumnFacts& column) {
+  const NameAndUnit& heading = column.heading;
   Said said{roleOfName(heading.name), std::nullopt, isCommand(heading.name)};
+  if (column.stamps != StampKind::None) {
+    said.unit = Quantity::Time;
+    if (said.role != Role::Other) said.role = Role::Time;
+    return said;
+  }
   if (heading.unit.empty()) return said;
   const auto unit = readUnit(heading.unit);
   said.unit = unit ? unit->quantity : Quantity::None;
@@ -114,7 +120,7 @@ class RoleFinder {
  public:
   RoleFinder(Columns columns, const ReadOptions& options, const std::optional<RigProfile>& rig)
       : columns_(columns), options_(options), rig_(rig) {
-    for (const ColumnFacts& column : columns) said_.push_back(saidBy(column.heading));
+    for (const ColumnFacts& column : columns) said_.push_back(saidBy(column));
   }
 
   Result<Roles> find() {
@@ -211,8 +217,9 @@ class RoleFinder {
       if (row.role != Role::Velocity) candidates_[row.role] = best;
       return;
     }
-    const bool named = said_[best.front()].role.has_value();
-    choice = {best.front(), named ? std::string("role-by-name") : std::string("role-by-unit"), {}};
+    choice = {best.front(), "role-by-unit", {}};
+    if (said_[best.front()].role) choice.why = "role-by-name";
+    if (columns_[best.front()].stamps != StampKind::None) choice.why = "role-by-clock";
   }
 
   bool allAlike(const Indices& columns) const {
@@ -228,7 +235,8 @@ class RoleFinder {
     for (std::size_t column = 0; column < columns_.size(); ++column) {
       const Said& said = said_[column];
       if (columns_[column].values.size() >= rowsForShape && !isTaken(column) && !said.role &&
-          !said.unit && !said.command && !isConstant(columns_[column].values)) {
+          !said.unit && !said.command && !isConstant(columns_[column].values) &&
+          !countsRows(columns_[column].values)) {
         found.push_back(column);
       }
     }
@@ -245,6 +253,13 @@ class RoleFinder {
 
   void takeByShape(RoleChoice& choice, std::size_t column) {
     choice = {column, "role-by-shape", std::nullopt};
+    const auto row = std::ranges::find_if(
+        roleRows, [&](const RoleRow& each) { return &(roles_.*each.choice) == &choice; });
+    roles_.remarks.push_back(Remark{"role-assumed",
+                                    Severity::Note,
+                                    {{"column", label(columns_, column)},
+                                     {"role", std::string(row->name)},
+                                     {"option", "--" + std::string(row->name)}}});
   }
 
   void takeClockByShape() {

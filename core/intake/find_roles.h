@@ -10,6 +10,7 @@
 #include "core/base/units.h"
 #include "core/intake/name_and_unit.h"
 #include "core/intake/read_run.h"
+#include "core/intake/stamp.h"
 
 namespace dampwright {
 
@@ -17,6 +18,7 @@ namespace dampwright {
 struct ColumnFacts {
   NameAndUnit heading;
   std::span<const double> values;
+  StampKind stamps = StampKind::None;  ///< its cells are times of day, read in seconds
 };
 
 /// Which column holds what, and how that is known.
@@ -34,8 +36,9 @@ struct Roles {
 
 /// The columns' roles by option, rig profile, name and unit, and where names say nothing by shape:
 /// what rises evenly is time, what is exactly the slope of another is its velocity, the smoothest
-/// oscillation is displacement, a last one left over is force. Where two columns would do, nothing
-/// is guessed. Errors: column-not-found with what there is.
+/// oscillation is displacement, a last one left over is force (remark role-assumed). Times of day
+/// are time; numbers that only count the rows are nothing. Where two columns would do, nothing is
+/// guessed. Errors: column-not-found with what there is.
 Result<Roles> findRoles(std::span<const ColumnFacts> columns,
                         const ReadOptions& options,
                         const std::optional<RigProfile>& rig);

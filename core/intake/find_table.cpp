@@ -171,6 +171,7 @@ std::vector<NameAndUnit> columnsOf(const Heading& heading, const Dialect& dialec
     NameAndUnit named = splitNameAndUnit(name);
     const std::string unit(withoutBrackets(cellText(heading.units, column)));
     if (!isMissing(unit)) named.unit = unit;
+    if (named.unit.empty()) named.unit = dialect.units[column];
     columns.push_back(std::move(named));
   }
   while (!columns.empty() && columns.back().name.empty() &&

@@ -1,7 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/intake/letters.h"
 
+#include <algorithm>
 #include <array>
+#include <cctype>
 #include <utility>
 
 namespace dampwright {
@@ -143,6 +145,12 @@ std::string withLetter(std::string text, char32_t point) {
     add(0x80 | (point & 0x3F));
   }
   return text;
+}
+
+bool hasLetter(std::string_view text) {
+  return std::any_of(text.begin(), text.end(), [](char letter) {
+    return std::isalpha(static_cast<unsigned char>(letter)) != 0 || (letter & 0x80) != 0;
+  });
 }
 
 std::string replaced(std::string_view text, std::string_view from, std::string_view to) {

@@ -30,6 +30,9 @@ Letter letterAt(std::string_view text, std::size_t i);
 /// The text with one letter more, as UTF-8.
 std::string withLetter(std::string text, char32_t point);
 
+/// Any letter, also outside ASCII.
+bool hasLetter(std::string_view text);
+
 /// Every `from` as `to`.
 std::string replaced(std::string_view text, std::string_view from, std::string_view to);
 

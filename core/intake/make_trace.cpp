@@ -2,6 +2,7 @@
 #include "core/intake/make_trace.h"
 
 #include <algorithm>
+#include <cmath>
 #include <utility>
 
 #include "core/intake/channels.h"
@@ -29,13 +30,41 @@ bool saidByCondition(const Remark& remark) {
   return remark.code == "missing-values" || remark.code == "gap" || remark.code == "uneven-clock";
 }
 
+constexpr double halfDay = 12 * 3600.0;
+
+// Times of day without a date fall by a day at midnight.
+std::vector<double> pastMidnights(std::vector<double> time, StampKind stamps) {
+  if (stamps != StampKind::Clock) return time;
+  double shift = 0, last = 0;
+  for (double& stamp : time) {
+    if (!std::isfinite(stamp)) continue;
+    if (stamp + shift < last - halfDay) shift += 2 * halfDay;
+    stamp += shift;
+    last = stamp;
+  }
+  return time;
+}
+
+// Seconds since 1970, days since 1900 or times of day: counted from the first row, because 1.7e9
+// leaves too few digits for the microseconds.
+std::vector<double> fromItsStart(std::vector<double> time) {
+  constexpr double surelyAbsolute = 3600;
+  const auto first =
+      std::find_if(time.begin(), time.end(), [](double stamp) { return std::isfinite(stamp); });
+  if (first == time.end() || std::abs(*first) < surelyAbsolute) return time;
+  const double start = *first;
+  for (double& stamp : time) stamp -= start;
+  return time;
+}
+
 class TraceMaker {
  public:
   TraceMaker(ReadTable table, const ReadOptions& options, const std::optional<RigProfile>& rig)
       : table_(std::move(table)), options_(options), rig_(rig) {
     reading_.remarks = std::move(table_.remarks);
     for (std::size_t column = 0; column < table_.headings.size(); ++column) {
-      facts_.push_back({table_.headings[column], table_.columns.values[column]});
+      facts_.push_back(
+          {table_.headings[column], table_.columns.values[column], table_.stamps[column]});
       table_.source.columns.push_back(
           {static_cast<int>(column) + 1,
            table_.headings[column].name,
@@ -122,16 +151,42 @@ class TraceMaker {
       return std::vector<double>{};
     }
     auto values = toSi(column.values, chosen.value().unit, choice);
+    if (role == Role::Time && column.stamps != StampKind::None) {
+      addClockTimes(shown, column.stamps);
+      return pastMidnights(std::move(values), column.stamps);
+    }
+    if (role == Role::Time && chosen.value().assumed && disagreesWithRate(values)) {
+      shown.role = Role::Other;
+      shown.why = "column-not-needed";
+      reading_.remarks.push_back(Remark{"rate-instead-of-time",
+                                        Severity::Warning,
+                                        {{"column", columnLabel(shown.name, *choice.column + 1)},
+                                         {"rate", *rate_, Quantity::Frequency}}});
+      return std::vector<double>{};
+    }
     if (chosen.value().assumed && !(role == Role::Time && options_.sampleRate)) {
       reading_.remarks.push_back(unitAssumed(shown, chosen.value(), values));
     }
     return values;
   }
 
+  void addClockTimes(const SourceColumn& shown, StampKind stamps) {
+    reading_.remarks.push_back(
+        Remark{"clock-times",
+               Severity::Note,
+               {{"column", columnLabel(shown.name, static_cast<std::size_t>(shown.index))},
+                {"form", std::string(stampName(stamps))}}});
+  }
+
+  bool disagreesWithRate(std::span<const double> seconds) const {
+    const double step = medianStep(seconds);
+    return rate_ && !options_.sampleRate && !(std::abs(step * *rate_ - 1) < 0.05);
+  }
+
   void setClock() {
     const auto rows = static_cast<std::size_t>(table_.columns.rows);
     if (!trace_.time.empty() && !options_.sampleRate) {
-      Clock clock = makeClock(std::move(trace_.time));
+      Clock clock = makeClock(fromItsStart(std::move(trace_.time)));
       trace_.time = std::move(clock.time);
       for (auto* values :
            {&trace_.displacement, &trace_.force, &trace_.velocity, &trace_.temperature}) {

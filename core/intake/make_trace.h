@@ -5,6 +5,7 @@
 #include "core/base/result.h"
 #include "core/intake/read_columns.h"
 #include "core/intake/read_run.h"
+#include "core/intake/stamp.h"
 
 namespace dampwright {
 
@@ -13,6 +14,7 @@ namespace dampwright {
 struct ReadTable {
   Source source;
   std::vector<NameAndUnit> headings;
+  std::vector<StampKind> stamps;  ///< per heading: how its column writes the time of day
   Columns columns;
   std::vector<Remark> remarks;
 };

@@ -16,12 +16,6 @@ namespace {
 
 using Entry = std::pair<std::string, std::string>;
 
-bool hasLetter(std::string_view text) {
-  return std::any_of(text.begin(), text.end(), [](char letter) {
-    return std::isalpha(static_cast<unsigned char>(letter)) != 0 || (letter & 0x80) != 0;
-  });
-}
-
 std::string_view withoutCommentMark(std::string_view line) {
   line = trimmed(line);
   while (line.starts_with('#') || line.starts_with('%')) line.remove_prefix(1);

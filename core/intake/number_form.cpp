@@ -8,6 +8,7 @@
 #include <string>
 
 #include "core/intake/letters.h"
+#include "core/intake/name_and_unit.h"
 
 namespace dampwright {
 namespace {
@@ -132,6 +133,16 @@ NumberLook lookAtNumber(std::string_view cell) {
   return fits ? NumberLook{true, marks.last, marks.first, 0} : NumberLook{};
 }
 
+std::optional<NumberWithUnit> splitUnit(std::string_view cell) {
+  if (cell.size() > longestNumber) return std::nullopt;
+  for (std::size_t i = 0; i + 1 < cell.size(); ++i) {
+    if (!isDigit(cell[i]) || isDigit(cell[i + 1])) continue;
+    const NumberWithUnit split{cell.substr(0, i + 1), trimmed(cell.substr(i + 1))};
+    if (readUnit(split.unit) && lookAtNumber(split.number).number) return split;
+  }
+  return std::nullopt;
+}
+
 std::optional<double> parseNumber(std::string_view cell, NumberForm form) {
   const auto parts = partsOf(cell);
   if (!parts) return std::nullopt;
@@ -158,9 +169,12 @@ std::optional<double> parseNumber(std::string_view cell, NumberForm form) {
 }
 
 bool isMissing(std::string_view cell) {
-  static constexpr std::array<std::string_view, 13> words = {
-      "", "nan", "na", "n/a", "#n/a", "null", "none", "-", "--", "---", "-nan", "nan(ind)", "#nv"};
-  if (cell.size() > 8) return false;
+  static constexpr auto words = std::to_array<std::string_view>(
+      {"",        "nan",      "na",        "n/a",     "n.a.",     "#n/a",    "null",     "none",
+       "-",       "--",       "---",       "-nan",    "nan(ind)", "#nv",     "inf",      "-inf",
+       "+inf",    "infinity", "-infinity", "1.#inf",  "-1.#inf",  "1.#qnan", "-1.#qnan", "1.#ind",
+       "-1.#ind", "nil",      "missing",   "#div/0!", "#value!",  "#wert!",  "-.-",      "--.--"});
+  if (cell.size() > 9) return false;
   return std::find(words.begin(), words.end(), lowered(cell)) != words.end();
 }
 

@@ -19,7 +19,7 @@ struct NumberForm {
 /// "nan", 1e999. Knows no locale.
 std::optional<double> parseNumber(std::string_view cell, NumberForm form);
 
-/// A cell that says that there is no value: empty, "nan", "n/a", "-", "null" and such.
+/// A cell that says that there is no value: empty, "nan", "inf", "n/a", "-", "null" and such.
 bool isMissing(std::string_view cell);
 
 /// What one cell gives away about the form of its column.
@@ -31,6 +31,12 @@ struct NumberLook {
 };
 
 NumberLook lookAtNumber(std::string_view cell);
+
+/// A number with a known unit behind it: "12.5 mm", "120N", "20 °C".
+struct NumberWithUnit {
+  std::string_view number, unit;
+};
+std::optional<NumberWithUnit> splitUnit(std::string_view cell);
 
 /// Votes of the cells of a column.
 struct FormVotes {

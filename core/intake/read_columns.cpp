@@ -3,11 +3,12 @@
 
 #include <algorithm>
 #include <array>
-#include <charconv>
 #include <cmath>
 #include <limits>
 #include <optional>
+#include <utility>
 
+#include "core/intake/fast_row.h"
 #include "core/intake/letters.h"
 
 namespace dampwright {
@@ -15,7 +16,9 @@ namespace {
 
 constexpr double absent = std::numeric_limits<double>::quiet_NaN();
 constexpr std::int64_t rowsPerReport = 1 << 15;  // about 3 ms of work
-constexpr std::size_t formatRows = 20;           // rows that show how wide the last field is
+constexpr std::size_t mostSections = 1000;
+constexpr std::size_t longestSection = 200;  // bytes of its text that are kept
+constexpr std::size_t formatRows = 20;       // rows that show how wide the last field is
 
 struct Count {
   std::int64_t count = 0, firstRow = 0;
@@ -33,8 +36,9 @@ struct Count {
 
 // What was met since the last good row belongs to the data only when another good row follows.
 struct Tally {
-  Count missing, unreadable, ragged, bad, blank;
+  Count missing, unreadable, ragged, bad, blank, section, comment;
   std::string example;  ///< the first unreadable cell
+  std::vector<SectionMark> sections;
 
   void add(const Tally& other) {
     missing.add(other.missing);
@@ -43,90 +47,12 @@ struct Tally {
     ragged.add(other.ragged);
     bad.add(other.bad);
     blank.add(other.blank);
+    section.add(other.section);
+    section.add(other.comment);
+    const std::size_t room = mostSections - std::min(mostSections, sections.size());
+    const std::size_t some = std::min(room, other.sections.size());
+    sections.insert(sections.end(), other.sections.begin(), other.sections.begin() + some);
   }
-};
-
-// Plain numbers straight from the bytes, for rows in which nothing is unusual.
-class FastRow {
- public:
-  explicit FastRow(const Dialect& dialect) : dialect_(dialect), values_(dialect.columns, absent) {}
-
-  /// True where the row is good; its numbers are then in values().
-  bool read(std::string_view text) {
-    const char* at = text.data();
-    const char* const end = at + text.size();
-    for (std::size_t column = 0; column < dialect_.columns; ++column) {
-      at = afterBlanks(at, end);
-      if (dialect_.numeric[column] != 0) {
-        const Parsed parsed = number(at, end, dialect_.forms[column]);
-        values_[column] = parsed.value;
-        at = parsed.end;
-      } else {
-        at = textField(at, end);
-      }
-      if (at == nullptr) return false;
-      at = afterBlanks(at, end);
-      if (column + 1 == dialect_.columns) break;
-      if (at == end) return false;
-      if (dialect_.delimiter != blanksDelimiter && *at++ != dialect_.delimiter) return false;
-    }
-    if (at != end && *at == dialect_.delimiter) at = afterBlanks(at + 1, end);
-    return at == end;
-  }
-
-  const std::vector<double>& values() const { return values_; }
-
- private:
-  struct Parsed {
-    const char* end = nullptr;  ///< behind the number, nothing where there is none
-    double value = absent;
-  };
-
-  const char* afterBlanks(const char* at, const char* end) const {
-    while (at != end && (*at == ' ' || (*at == '\t' && dialect_.delimiter != '\t'))) ++at;
-    return at;
-  }
-
-  const char* textField(const char* at, const char* end) const {
-    while (at != end && *at != dialect_.delimiter) {
-      if (*at == '"' || (dialect_.delimiter == blanksDelimiter && *at == '\t')) return nullptr;
-      ++at;
-    }
-    return at;
-  }
-
-  static Parsed number(const char* at, const char* end, NumberForm form) {
-    if (form.thousands != 0) return {};
-    if (at != end && *at == '+') ++at;
-    const char* const first = at != end && *at == '-' ? at + 1 : at;
-    const bool starts =
-        first != end && ((*first >= '0' && *first <= '9') || *first == form.decimal);
-    if (!starts) return {};  // also "inf" and "nan", which from_chars would take
-    if (form.decimal != '.') return commaNumber(at, end);
-    Parsed parsed;
-    const auto [stop, problem] = std::from_chars(at, end, parsed.value);
-    if (problem == std::errc{}) parsed.end = stop;
-    return parsed;
-  }
-
-  static Parsed commaNumber(const char* at, const char* end) {
-    std::array<char, 64> copy;
-    std::size_t length = 0;
-    for (; at + length != end && length < copy.size(); ++length) {
-      const char letter = at[length];
-      const bool part = (letter >= '0' && letter <= '9') || letter == '-' || letter == '+' ||
-                        letter == 'e' || letter == 'E' || letter == ',';
-      if (!part) break;
-      copy[length] = letter == ',' ? '.' : letter;
-    }
-    Parsed parsed;
-    const auto [stop, problem] = std::from_chars(copy.data(), copy.data() + length, parsed.value);
-    if (problem == std::errc{} && stop == copy.data() + length) parsed.end = at + length;
-    return parsed;
-  }
-
-  const Dialect& dialect_;
-  std::vector<double> values_;
 };
 
 class TableReader {
@@ -156,13 +82,16 @@ class TableReader {
 
  private:
   void takeSlowly(const Line& line) {
-    if (trimmed(line.text).empty() || isComment(line.text)) return;
+    if (trimmed(line.text).empty()) return;
+    if (isComment(line.text)) return addSection(line, pending_.comment);
     const auto cells = splitRow(line.text, dialect_.delimiter);
     const std::vector<double> nothing(dialect_.columns, absent);
     met_ = true;
     if (std::all_of(cells.begin(), cells.end(), [](const Cell& c) { return c.text.empty(); })) {
       pending_.blank.add(line.number);
       append(nothing, line.number);
+    } else if (isSection(cells)) {
+      addSection(line, pending_.section);
     } else if (!holdsNumber(cells)) {
       pending_.bad.add(line.number);
     } else if (!fieldsCanBeToldApart(cells)) {
@@ -173,6 +102,32 @@ class TableReader {
     }
   }
 
+  // Text where numbers belong, and fewer numbers than a row of data has: "Step 2", "Speed;100", the
+  // header once more.
+  bool isSection(const std::vector<Cell>& cells) const {
+    std::size_t numbers = 0, wanted = 0;
+    bool text = false, first = true;
+    for (std::size_t column = 0; column < dialect_.columns; ++column) {
+      if (dialect_.numeric[column] == 0) continue;
+      ++wanted;
+      if (column >= cells.size()) continue;
+      const std::string_view cell = cells[column].text;
+      const bool number = readCell(cell, dialect_, column).has_value();
+      numbers += number ? 1 : 0;
+      if (first) text = !number && !isMissing(cell) && hasLetter(cell);
+      first = false;
+    }
+    return text && 2 * numbers < wanted;
+  }
+
+  void addSection(const Line& line, Count& count) {
+    met_ = true;
+    count.add(line.number);
+    if (pending_.sections.size() >= mostSections) return;
+    pending_.sections.push_back(
+        {line.number, std::string(startOf(trimmed(line.text), longestSection))});
+  }
+
   // More fields than columns, or with blanks as delimiter fewer: nobody knows which is which.
   bool fieldsCanBeToldApart(const std::vector<Cell>& cells) const {
     for (std::size_t i = dialect_.columns; i < cells.size(); ++i) {
@@ -181,10 +136,12 @@ class TableReader {
     return dialect_.delimiter != blanksDelimiter || cells.size() >= dialect_.columns;
   }
 
-  static bool holdsNumber(const std::vector<Cell>& cells) {
-    return std::any_of(cells.begin(), cells.end(), [](const Cell& cell) {
-      return lookAtNumber(cell.text).number;
-    });
+  bool holdsNumber(const std::vector<Cell>& cells) const {
+    for (std::size_t column = 0; column < std::min(cells.size(), dialect_.columns); ++column) {
+      if (readCell(cells[column].text, dialect_, column)) return true;
+      if (lookAtNumber(cells[column].text).number) return true;
+    }
+    return false;
   }
 
   void takeCells(const std::vector<Cell>& cells, const Line& line) {
@@ -198,7 +155,7 @@ class TableReader {
         continue;
       }
       const std::string_view text = cells[column].text;
-      if (const auto value = parseNumber(text, dialect_.forms[column])) {
+      if (const auto value = readCell(text, dialect_, column)) {
         row[column] = *value;
         ++numbers;
       } else if (isMissing(text)) {
@@ -264,9 +221,10 @@ class TableReader {
   // missing, or where that is shorter than all before it: the file was still being written.
   void cutShortRow() {
     if (!lastLine_ || lastLine_->terminated || columns_.rows == 0) return;
+    const bool textBehind = pending_.bad.count + pending_.section.count > 0;
     if (goodRows_ != columns_.rows) {
       truncated_ = pending_.ragged.count + pending_.unreadable.count > 0;
-    } else if (lastNumberIsShort()) {
+    } else if (!textBehind && lastNumberIsShort()) {
       truncated_ = true;
       --goodRows_;
     }
@@ -297,13 +255,16 @@ class TableReader {
               Remark{"unreadable-cells", Severity::Warning, {{"example", settled_.example}}});
     addRemark(settled_.ragged, Remark{"ragged-rows", Severity::Warning, {}});
     addRemark(settled_.bad, Remark{"bad-rows", Severity::Warning, {}});
+    addRemark(settled_.section, Remark{"section-lines", Severity::Note, {}});
     addRemark(settled_.blank, Remark{"blank-rows", Severity::Note, {}});
     columns_.unreadable = settled_.unreadable.count;
+    columns_.sections = std::move(settled_.sections);
     if (truncated_) {
       addRemark({1, lastLine_->number}, Remark{"truncated-last-row", Severity::Note, {}});
       return;
     }
     Count trailing = pending_.bad;
+    trailing.add(pending_.section);
     trailing.add(pending_.ragged);
     trailing.add({pending_.unreadable.count > 0 ? 1 : 0, pending_.unreadable.firstRow});
     addRemark(trailing, Remark{"trailing-text", Severity::Note, {}});

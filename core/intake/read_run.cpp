@@ -61,6 +61,14 @@ std::vector<Remark> remarksOf(const Layout& layout) {
   return remarks;
 }
 
+std::vector<StampKind> stampsOf(const Layout& layout) {
+  std::vector<StampKind> stamps(layout.table.columns.size(), StampKind::None);
+  for (std::size_t column = 0; column < std::min(stamps.size(), layout.dialect.columns); ++column) {
+    stamps[column] = layout.dialect.stamps[column].kind;
+  }
+  return stamps;
+}
+
 RunReading stoppedAtDecimal(const Layout& layout) {
   RunReading reading;
   reading.source = sourceOf(layout);
@@ -112,8 +120,14 @@ Result<RunReading> readLaidOut(Layout layout,
                  {{"rows", static_cast<double>(columns.value().rows), Quantity::Count}},
                  {"", layout.table.firstDataRow, 0}};
   }
-  ReadTable table{
-      sourceOf(layout), layout.table.columns, std::move(columns).value(), remarksOf(layout)};
+  ReadTable table{sourceOf(layout),
+                  layout.table.columns,
+                  stampsOf(layout),
+                  std::move(columns).value(),
+                  remarksOf(layout)};
+  for (const SectionMark& section : table.columns.sections) {
+    table.source.metadata.emplace_back("line " + std::to_string(section.line), section.text);
+  }
   table.source.rows = table.columns.rows;
   std::ranges::copy(table.columns.remarks, std::back_inserter(table.remarks));
   table.columns.values.resize(std::max(table.columns.values.size(), table.headings.size()));

@@ -63,19 +63,35 @@ TEST(ReadColumns, RowsOfAnotherLengthStayInPlaceAndAreCounted) {
   EXPECT_EQ(remarkOf(columns.remarks, "ragged-rows")->firstRow, 5);
 }
 
-TEST(ReadColumns, TextLinesAmongTheDataAreLeftOutAndCounted) {
+TEST(ReadColumns, TextLinesAmongTheDataAreKeptAsMarksOfSections) {
   const Columns columns = columnsOf(head + "Step 2 of 3\nt;x;F\n0.3;1.9;6\n");
   EXPECT_EQ(columns.rows, 4);
-  EXPECT_EQ(remarkOf(columns.remarks, "bad-rows")->count, 2);
-  EXPECT_EQ(remarkOf(columns.remarks, "bad-rows")->firstRow, 5);
+  EXPECT_EQ(remarkOf(columns.remarks, "section-lines")->count, 2);
+  EXPECT_EQ(remarkOf(columns.remarks, "section-lines")->firstRow, 5);
+  ASSERT_EQ(columns.sections.size(), 2u);
+  EXPECT_EQ(columns.sections[0].text, "Step 2 of 3");
+  EXPECT_EQ(columns.sections[1].line, 6);
   EXPECT_EQ(columns.lineOf(3), 7);
   EXPECT_EQ(columns.lineOf(0), 2);
 }
 
-TEST(ReadColumns, CommentsAndBlankLinesAreNoRows) {
+TEST(ReadColumns, SectionsWithNumbersAreNoRowsOfData) {
+  const Columns columns = columnsOf(head + "Step;2\nSpeed 100 mm/s;100;\n0.3;1.9;6\n");
+  EXPECT_EQ(columns.rows, 4);
+  EXPECT_EQ(columns.sections.size(), 2u);
+}
+
+TEST(ReadColumns, RowsOfMissingValuesOnlyAreLeftOutAndCounted) {
+  const Columns columns = columnsOf(head + "-;-;-\n0.3;1.9;6\n");
+  EXPECT_EQ(columns.rows, 4);
+  EXPECT_EQ(remarkOf(columns.remarks, "bad-rows")->count, 1);
+}
+
+TEST(ReadColumns, BlankLinesAreNoRowsAndCommentsAreMarks) {
   const Columns columns = columnsOf(head + "\n# pause\n\n0.3;1.9;6\n# end\n\n");
   EXPECT_EQ(columns.rows, 4);
-  EXPECT_TRUE(columns.remarks.empty());
+  ASSERT_EQ(columns.sections.size(), 1u);
+  EXPECT_EQ(columns.sections[0].text, "# pause");
 }
 
 TEST(ReadColumns, RowsOfDelimitersAmongTheDataCountAndBelowItDoNot) {
