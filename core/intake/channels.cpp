@@ -50,7 +50,7 @@ Guess timeUnit(std::span<const double> raw, const UnitHints& hints) {
   if (serialDay && plausibleStep(step * 86400, {std::nullopt, hints.sampleRate, {}, {}}))
     return {"d"};
   for (const auto& [symbol, seconds] :
-       {std::pair{"s", 1.0}, {"ms", 1e-3}, {"µs", 1e-6}, {"ns", 1e-9}}) {
+       {std::pair{"s", 1.0}, {"ms", 1e-3}, {"µs", 1e-6}, {"ns", 1e-9}, {"min", 60.0}}) {
     if (plausibleStep(step * seconds, hints)) return {symbol, !hints.sampleRate};
   }
   return {"s"};

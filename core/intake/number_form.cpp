@@ -15,6 +15,7 @@ namespace {
 
 constexpr std::size_t longestNumber = 64;  // letters; longer is no measured value
 constexpr std::string_view minusSign = "\xE2\x88\x92";
+constexpr std::string_view curlyApostrophe = "\xE2\x80\x99";
 constexpr std::string_view noBreakSpace = "\xC2\xA0";
 constexpr std::string_view narrowNoBreakSpace = "\xE2\x80\xAF";
 
@@ -53,6 +54,9 @@ std::optional<Parts> partsOf(std::string_view cell) {
     } else if (cell.starts_with(noBreakSpace) || cell.starts_with(narrowNoBreakSpace)) {
       parts.mantissa += ' ';
       cell.remove_prefix(cell.starts_with(noBreakSpace) ? 2 : 3);
+    } else if (cell.starts_with(curlyApostrophe)) {
+      parts.mantissa += '\'';
+      cell.remove_prefix(curlyApostrophe.size());
     } else {
       break;
     }

@@ -130,7 +130,8 @@ class TableReader {
 
   // More fields than columns, or with blanks as delimiter fewer: nobody knows which is which.
   bool fieldsCanBeToldApart(const std::vector<Cell>& cells) const {
-    for (std::size_t i = dialect_.columns; i < cells.size(); ++i) {
+    const bool textLast = dialect_.numeric[dialect_.columns - 1] == 0;  // may hold the delimiter
+    for (std::size_t i = dialect_.columns; i < cells.size() && !textLast; ++i) {
       if (!cells[i].text.empty()) return false;
     }
     return dialect_.delimiter != blanksDelimiter || cells.size() >= dialect_.columns;
@@ -223,7 +224,7 @@ class TableReader {
     if (!lastLine_ || lastLine_->terminated || columns_.rows == 0) return;
     const bool textBehind = pending_.bad.count + pending_.section.count > 0;
     if (goodRows_ != columns_.rows) {
-      truncated_ = pending_.ragged.count + pending_.unreadable.count > 0;
+      truncated_ = !textBehind && pending_.ragged.count + pending_.unreadable.count > 0;
     } else if (!textBehind && lastNumberIsShort()) {
       truncated_ = true;
       --goodRows_;
