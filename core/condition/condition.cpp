@@ -168,7 +168,9 @@ ConditionOptions conditionOptions(const RigProfile& rig) {
   return options;
 }
 
-Result<Motion> condition(const Trace& trace, const ConditionOptions& options) {
+Result<Motion> condition(const Trace& trace,
+                         const ConditionOptions& options,
+                         const Progress& progress) {
   if (!longEnough(trace)) return tooShort(trace);
   const ClockFinding clock = lookAtClock(trace.time);
   const auto rows = static_cast<double>(trace.time.size());
@@ -176,12 +178,17 @@ Result<Motion> condition(const Trace& trace, const ConditionOptions& options) {
     return Error{"gap-too-long",
                  {{"duration", trace.time.back() - trace.time.front(), Quantity::Time}},
                  {trace.source.file.name, 0, 0}};
-  RawChannels raw = onEvenClock(lookThrough(trace, options.spikeThreshold), trace, clock);
+  const auto stopped = [&] { return progress.cancelled(); };
+  if (stopped()) return Error{"stopped", {}, {}};
+  RawChannels raw = onEvenClock(lookThrough(trace, options.spikeThreshold, progress), trace, clock);
   const std::vector<double> recordedVelocity = raw.velocity;
   Motion motion = withoutDelay(motionOf(std::move(raw), clock.clock), options.forceDelay);
+  if (stopped()) return Error{"stopped", {}, {}};
   const LocalPolynomial derivative = derivativeOf(motion);
   motion = withoutInertia(std::move(motion), options.movingMass, derivative);
+  if (stopped()) return Error{"stopped", {}, {}};
   motion = filtered(std::move(motion), options.lowPass);
+  if (stopped()) return Error{"stopped", {}, {}};
   motion.velocity = applyLocal(derivative, motion.displacement, motion.rate);
   if (auto remark = velocityRemark(motion, recordedVelocity)) motion.remarks.push_back(*remark);
   motion.remarks = withoutRepeated(std::move(motion.remarks), trace.remarks);

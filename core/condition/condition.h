@@ -2,6 +2,7 @@
 #pragma once
 #include <optional>
 
+#include "core/base/progress.h"
 #include "core/base/result.h"
 #include "core/condition/motion.h"
 #include "core/rig/rig_profile.h"
@@ -31,7 +32,9 @@ ConditionOptions conditionOptions(const RigProfile& rig);
 /// Remarks (those that the trace already carries are not repeated): uneven-clock, gap,
 /// missing-values, spikes-removed, clipped-force, velocity-disagrees.
 /// A class too high for the sample rate (over rate/4.2) filters nothing.
-/// Errors: trace-too-short (values: rows, needed), gap-too-long (values: duration).
-Result<Motion> condition(const Trace& trace, const ConditionOptions& options = {});
+/// Errors: trace-too-short (values: rows, needed), gap-too-long (values: duration), stopped.
+Result<Motion> condition(const Trace& trace,
+                         const ConditionOptions& options = {},
+                         const Progress& progress = {});
 
 }  // namespace dampwright

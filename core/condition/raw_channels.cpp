@@ -152,7 +152,7 @@ std::vector<Remark> clockRemarks(const Trace& trace, const ClockFinding& finding
 
 }  // namespace
 
-RawChannels lookThrough(const Trace& trace, double spikeThreshold) {
+RawChannels lookThrough(const Trace& trace, double spikeThreshold, const Progress& progress) {
   RawChannels raw;
   raw.doubt.resize(trace.displacement.size());
   raw.displacement = filled(trace.displacement);
@@ -160,9 +160,12 @@ RawChannels lookThrough(const Trace& trace, double spikeThreshold) {
   raw.velocity = filled(trace.velocity);
   raw.temperature = filled(trace.temperature);
   raw = withMissing(std::move(raw), trace);
+  if (progress.cancelled()) return raw;
   raw = withoutSpikesOf(
       std::move(raw), &RawChannels::displacement, "displacement", trace, spikeThreshold);
+  if (progress.cancelled()) return raw;
   raw = withoutSpikesOf(std::move(raw), &RawChannels::force, "force", trace, spikeThreshold);
+  if (progress.cancelled()) return raw;
   return withClipped(std::move(raw), trace);
 }
 

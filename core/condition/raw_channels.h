@@ -2,6 +2,7 @@
 #pragma once
 #include <vector>
 
+#include "core/base/progress.h"
 #include "core/base/remark.h"
 #include "core/condition/even_clock.h"
 #include "core/trace/trace.h"
@@ -18,8 +19,8 @@ struct RawChannels {
 };
 
 /// Looks through the rows of a trace as they stand. Remarks: missing-values, spikes-removed,
-/// clipped-force.
-RawChannels lookThrough(const Trace& trace, double spikeThreshold);
+/// clipped-force. When asked to stop, what was done so far.
+RawChannels lookThrough(const Trace& trace, double spikeThreshold, const Progress& progress);
 
 /// The channels on the clock that was found; the same where it is even already. Gaps are marked.
 /// Remarks: uneven-clock, gap.

@@ -119,12 +119,14 @@ Block BlockMaker::make(const CycleGroup& group, bool firstFast) const {
 // Blocks of the groups in time order, the conditioning rule kept over the whole recording.
 std::vector<Block> speedBlocks(const Motion& motion,
                                const CycleOptions& options,
-                               const std::vector<CycleGroup>& groups) {
+                               const std::vector<CycleGroup>& groups,
+                               const Progress& progress) {
   const BlockMaker maker(motion, options);
   std::vector<Block> blocks;
   bool fastSeen = false;
   double lastEnd = 0;
   for (const CycleGroup& group : groups) {
+    if (progress.cancelled()) break;
     const double rest = (group.cycles.front().start - lastEnd) / motion.rate;
     if (rest > options.longStandstill) fastSeen = false;
     blocks.push_back(maker.make(group, !fastSeen));
@@ -144,12 +146,16 @@ Error noFullCycle(const Motion& motion, const StrokeSummary& found) {
 
 }  // namespace
 
-Result<std::vector<Block>> findBlocks(const Motion& motion, const CycleOptions& options) {
+Result<std::vector<Block>> findBlocks(const Motion& motion,
+                                      const CycleOptions& options,
+                                      const Progress& progress) {
   const StrokeSummary found =
       motion.size() < 8 ? StrokeSummary{} : findCycles(motion, options.reversal, options.holdTime);
   if (found.cycles.empty()) return noFullCycle(motion, found);
+  if (progress.cancelled()) return Error{"stopped", {}, {}};
   std::vector<Block> blocks =
-      speedBlocks(motion, options, groupCycles(found.cycles, options.alike));
+      speedBlocks(motion, options, groupCycles(found.cycles, options.alike), progress);
+  if (progress.cancelled()) return Error{"stopped", {}, {}};
   for (const Standstill& hold : found.holds)
     if (auto block = holdBlock(motion, hold)) blocks.push_back(std::move(*block));
   std::sort(blocks.begin(), blocks.end(), [](const Block& a, const Block& b) {

@@ -2,6 +2,7 @@
 #pragma once
 #include <vector>
 
+#include "core/base/progress.h"
 #include "core/base/result.h"
 #include "core/condition/motion.h"
 #include "core/cycles/block.h"
@@ -31,7 +32,9 @@ struct CycleOptions {
 /// ±25 mm. Conditioning: the first `firstBlockConditioning` cycles of the first block, then
 /// `laterBlockConditioning`, never more than a third of a block, rounded down.
 /// Remarks of a block: few-conditioning-cycles, not-warm, too-few-cycles, cycle-struck-out.
-/// Errors: no-full-cycle (values: turning_points, longest_stroke, duration).
-Result<std::vector<Block>> findBlocks(const Motion& motion, const CycleOptions& options = {});
+/// Errors: no-full-cycle (values: turning_points, longest_stroke, duration), stopped.
+Result<std::vector<Block>> findBlocks(const Motion& motion,
+                                      const CycleOptions& options = {},
+                                      const Progress& progress = {});
 
 }  // namespace dampwright

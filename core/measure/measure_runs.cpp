@@ -2,7 +2,9 @@
 #include "core/measure/measure_runs.h"
 
 #include <algorithm>
+#include <limits>
 
+#include "core/curves/branches.h"
 #include "core/curves/read_block.h"
 #include "core/curves/remove_gas.h"
 #include "core/identify/fit_laws.h"
@@ -45,6 +47,22 @@ Curve curveOf(const Measurement& measurement, Direction direction) {
                    measurement.gas.force ? GasLine(gasAt) : GasLine());
 }
 
+/// Sets the loop widths, for which the gas force over the stroke must be known: the whole of it, or
+/// its rate where the zero hides the rest (a constant falls out of a width).
+void readWidths(Measurement& measurement) {
+  const Gas& gas = measurement.gas;
+  for (MeasuredBlock& measured : measurement.blocks) {
+    const Block& block = measured.block;
+    const auto gasAt = [&](double x) {
+      if (gas.force) return gas.at(block.mid + x);
+      return gas.rate ? *gas.rate * x : std::numeric_limits<double>::quiet_NaN();
+    };
+    const LoopWidths widths = loopWidths(block, gasAt);
+    measured.loopWidth = widths.atZero;
+    measured.halfSpeedWidth = widths.atHalfSpeed;
+  }
+}
+
 /// Everything but the direction, which may turn the recordings round.
 Result<Measured> measureAsRead(std::span<const Trace> traces,
                                const MeasureOptions& options,
@@ -55,7 +73,7 @@ Result<Measured> measureAsRead(std::span<const Trace> traces,
   measurement.rig = accuracyOf(options.rig);
   for (std::size_t i = 0; i < traces.size(); ++i) {
     if (progress.cancelled()) return Error{"stopped", {}, {}};
-    Result<ReadRun> read = readRunBlocks(traces[i], i, options);
+    Result<ReadRun> read = readRunBlocks(traces[i], i, options, progress);
     if (!read) return read.error();
     measurement.runs.push_back(std::move(read.value().run));
     measured.motions.push_back(std::move(read.value().motion));
@@ -65,6 +83,7 @@ Result<Measured> measureAsRead(std::span<const Trace> traces,
   const GasAndFriction identified = gasAndFriction(measurement);
   measurement.gas = identified.gas;
   measurement.friction = identified.friction;
+  readWidths(measurement);
   measurement.compression = curveOf(measurement, Direction::Compression);
   measurement.rebound = curveOf(measurement, Direction::Rebound);
   measurement.compressionLaws =

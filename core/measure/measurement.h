@@ -35,10 +35,12 @@ struct MeasuredRun {
 struct MeasuredBlock {
   std::size_t run = 0;  ///< index into runs
   Block block;
-  double energy = 0;                  ///< J absorbed per cycle
-  double meanPower = 0;               ///< W
-  double equivalentDamping = 0;       ///< N·s/m, ∮F dx / ∮v dx
-  double phaseLag = 0;                ///< rad, first harmonic of force behind velocity
+  double energy = 0;             ///< J absorbed per cycle
+  double meanPower = 0;          ///< W
+  double equivalentDamping = 0;  ///< N·s/m, ∮F dx / ∮v dx
+  double loopWidth = 0;       ///< N, at v = 0, gas taken off; NaN where gas or branch is not known
+  double halfSpeedWidth = 0;  ///< N, at half the peak speed, the same
+  double phaseLag = 0;        ///< rad, first harmonic of force behind velocity
   std::array<double, 2> endForces{};  ///< N at full compression and full rebound of the stroke
   Reading compression, rebound;
 

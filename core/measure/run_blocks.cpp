@@ -66,18 +66,22 @@ std::vector<Remark> remarksOf(const Trace& trace,
 
 Result<ReadRun> readRunBlocks(const Trace& trace,
                               std::size_t index,
-                              const MeasureOptions& options) {
-  Result<Motion> motion = condition(trace, conditionOptions(options.rig));
+                              const MeasureOptions& options,
+                              const Progress& progress) {
+  Result<Motion> motion = condition(trace, conditionOptions(options.rig), progress);
   if (!motion) return inFile(motion.error(), trace);
   CycleOptions cycleOptions;
   cycleOptions.firstBlockConditioning = options.firstBlockConditioning;
   cycleOptions.laterBlockConditioning = options.laterBlockConditioning;
   if (index < options.struckOut.size()) cycleOptions.struckOut = options.struckOut[index];
-  Result<std::vector<Block>> blocks = findBlocks(motion.value(), cycleOptions);
+  Result<std::vector<Block>> blocks = findBlocks(motion.value(), cycleOptions, progress);
   if (!blocks) return inFile(blocks.error(), trace);
 
   ReadRun read;
-  for (Block& block : blocks.value()) read.blocks.push_back(readOne(std::move(block), index));
+  for (Block& block : blocks.value()) {
+    if (progress.cancelled()) return Error{"stopped", {}, {}};
+    read.blocks.push_back(readOne(std::move(block), index));
+  }
   read.run.source = trace.source;
   read.run.sampleRate = motion.value().rate;
   read.run.zeroState = trace.zeroState;

@@ -17,6 +17,9 @@ struct ReadRun {
 
 /// condition → findBlocks → readBlock for one recording. Remarks of its blocks stand with the run,
 /// each code once with its count. Errors: those of condition and findBlocks, with the file's name.
-Result<ReadRun> readRunBlocks(const Trace& trace, std::size_t index, const MeasureOptions& options);
+Result<ReadRun> readRunBlocks(const Trace& trace,
+                              std::size_t index,
+                              const MeasureOptions& options,
+                              const Progress& progress);
 
 }  // namespace dampwright

@@ -87,6 +87,8 @@ void describe(Fields& io, MeasuredBlock& measured) {
   io.number("energy_j", measured.energy);
   io.number("mean_power_w", measured.meanPower);
   io.number("equivalent_damping_n_s_per_m", measured.equivalentDamping);
+  io.number("loop_width_n", measured.loopWidth);
+  io.number("half_speed_width_n", measured.halfSpeedWidth);
   io.number("phase_lag_deg", measured.phaseLag);
   std::vector<double> ends(measured.endForces.begin(), measured.endForces.end());
   io.numbers("end_forces_n", ends);
