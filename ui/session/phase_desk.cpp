@@ -104,7 +104,7 @@ void PhaseDesk::measure(Entry& entry) {
       },
       [this, &entry](double share) {
         entry.state.progress = share;
-        emit changed(entry.key);
+        emit progressed(entry.key);
       });
   emit changed(entry.key);
 }

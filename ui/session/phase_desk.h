@@ -41,7 +41,8 @@ class PhaseDesk : public QObject {
   std::optional<VerdictWord> verdictOfAll() const;
 
  signals:
-  void changed(const dampwright::PhaseKey& key);
+  void changed(const dampwright::PhaseKey& key);     ///< anything but progress
+  void progressed(const dampwright::PhaseKey& key);  ///< progress alone
 
  private:
   struct Entry {

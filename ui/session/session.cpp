@@ -25,6 +25,7 @@ Session::Session(const QString& bookFile, const QString& sampleRuns, QObject* pa
   connect(&keeper_, &BookKeeper::trouble, this, &Session::tellTrouble);
   connect(&keeper_, &BookKeeper::well, this, [this] { emit bookTrouble({}); });
   connect(&keeper_, &BookKeeper::settled, this, &Session::settle);
+  connect(&desk_, &PhaseDesk::progressed, this, &Session::progressChanged);
   connect(&desk_, &PhaseDesk::changed, this, [this](const PhaseKey& key) {
     emit stateChanged(key);
     noteVerdict();

@@ -39,6 +39,7 @@ class Session : public QObject {
   std::vector<Limits> knownLimits()
       const;  ///< the job book's limit sheets, newest revision of each title
   const std::vector<JobSummary>& recentJobs() const;  ///< newest first, up to 50
+  /// Of all drops, oldest first. One stays until it is dismissed or its file is dropped again.
   const std::vector<DropProblem>& dropProblems() const;
   bool busy() const;          ///< files are read, measured or written, or the book is not read yet
   bool hasUnwritten() const;  ///< the book is in trouble, and something typed is only in memory
@@ -67,12 +68,15 @@ class Session : public QObject {
   void putBack(const dampwright::PhaseKey& key, int run, const dampwright::TimeSpan& span);
   /// Answers the question which way is compression, for this run's rig, once and for good.
   void settleDirection(const dampwright::PhaseKey& key, dampwright::Direction displacementPositive);
+  void dismissDropProblem(int problem);  ///< index into dropProblems()
+  void dismissDropProblems();
   void stopWork();
 
  signals:
   void jobChanged();  ///< anything of the job itself, or another job
   void selectionChanged();
-  void stateChanged(const dampwright::PhaseKey& key);  ///< busy, progress, measurement or verdict
+  void stateChanged(const dampwright::PhaseKey& key);  ///< busy, measurement, verdict or problem
+  void progressChanged(const dampwright::PhaseKey& key);
   void limitsKnownChanged();
   void recentJobsChanged();
   void bookRead();  ///< once, after the start: limits, recent jobs and the last open job are there
@@ -108,6 +112,7 @@ class Session : public QObject {
   std::vector<RunBytes> unstored(const Job& job) const;
   void writeJob(const Job& job, const QString& what);
   void takeDrop(std::vector<DroppedItem> items, const QString& corner);
+  void forgetProblems(const QStringList& files);
   static void refuseJobItems(std::vector<DroppedItem>& items);
   void takeRuns(std::vector<DroppedRun> runs, const QString& corner);
   void takeCard(const DamperCard& card, const QString& corner);

@@ -1,5 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 // What comes of dropped files.
+#include <QFileInfo>
 #include <utility>
 
 #include "ui/session/change_job.h"
@@ -9,21 +10,60 @@
 
 namespace dampwright {
 
+namespace {
+
+QStringList namesOf(const QStringList& paths) {
+  QStringList names;
+  for (const QString& path : paths) names << QFileInfo(path).fileName();
+  return names;
+}
+
+// What problems of documents stand under.
+QStringList titlesOf(const std::vector<DroppedItem>& items) {
+  QStringList titles;
+  for (const DroppedItem& item : items) {
+    if (const auto* card = std::get_if<DamperCard>(&item))
+      titles << QString::fromStdString(card->serial);
+    if (const auto* limits = std::get_if<Limits>(&item))
+      titles << QString::fromStdString(limits->title);
+  }
+  return titles;
+}
+
+}  // namespace
+
 void Session::dropFiles(const QStringList& paths, const QString& corner) {
   if (paths.isEmpty()) return;
   wasBusy_ = true;
-  if (drops_++ == 0 && !dropProblems_.empty()) {
-    dropProblems_.clear();
-    emit dropProblemsChanged();
-  }
-  intake_.add([task = DropTask{paths, desk_.profiles(), bookFile_}](
-                  const Progress& progress) { return readDrop(task, progress); },
-              [this, corner, job = number_](std::vector<DroppedItem> items) {
-                --drops_;
-                if (job && job != number_) refuseJobItems(items);
-                takeDrop(std::move(items), corner);
-                settle();
-              });
+  ++drops_;
+  intake_.add(
+      [task = DropTask{paths, desk_.profiles(), bookFile_}](const Progress& progress) {
+        return readDrop(task, progress);
+      },
+      [this, corner, job = number_, names = namesOf(paths)](std::vector<DroppedItem> items) {
+        --drops_;
+        forgetProblems(names + titlesOf(items));
+        if (job && job != number_) refuseJobItems(items);
+        takeDrop(std::move(items), corner);
+        settle();
+      });
+}
+
+// What was said of a file before is out of date once the file was read again.
+void Session::forgetProblems(const QStringList& files) {
+  std::erase_if(dropProblems_,
+                [&](const DropProblem& problem) { return files.contains(problem.file); });
+}
+
+void Session::dismissDropProblem(int problem) {
+  if (problem < 0 || problem >= static_cast<int>(dropProblems_.size())) return;
+  dropProblems_.erase(dropProblems_.begin() + problem);
+  emit dropProblemsChanged();
+}
+
+void Session::dismissDropProblems() {
+  if (std::exchange(dropProblems_, {}).empty()) return;
+  emit dropProblemsChanged();
 }
 
 // What was dropped on one job must not land in another that was opened meanwhile.
@@ -56,7 +96,7 @@ void Session::takeDrop(std::vector<DroppedItem> items, const QString& corner) {
   for (const DroppedItem& item : items) {
     if (const auto* limits = std::get_if<Limits>(&item)) takeLimits(*limits);
   }
-  if (!dropProblems_.empty()) emit dropProblemsChanged();
+  emit dropProblemsChanged();
 }
 
 void Session::takeRuns(std::vector<DroppedRun> runs, const QString& corner) {

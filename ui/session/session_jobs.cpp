@@ -31,6 +31,9 @@ void Session::open(const Job& job, NumberCell number, const std::vector<RunBytes
       std::ranges::find_if(job_->items, [](const JobItem& item) { return !item.phases.empty(); });
   const JobItem& first = tested == job_->items.end() ? job_->items.front() : *tested;
   selected_ = {QString::fromStdString(first.corner), 0};
+  // What was said of files that were taken belongs to the job that took them.
+  std::erase_if(dropProblems_, [](const DropProblem& problem) { return problem.taken; });
+  emit dropProblemsChanged();
   emit jobChanged();
   emit selectionChanged();
 }
@@ -78,6 +81,7 @@ void Session::openJob(const QString& number) {
 void Session::takeJob(const Job& job) {
   const auto number = std::make_shared<std::string>(job.number);
   remember(number);
+  forgetProblems({QString::fromStdString(job.number)});
   open(job, number);
 }
 

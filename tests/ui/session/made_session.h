@@ -76,6 +76,12 @@ class ASession : public testing::Test {
     for (const DropProblem& problem : session->dropProblems()) codes.push_back(problem.error.code);
     return codes;
   }
+  std::vector<std::string> files() const {
+    std::vector<std::string> names;
+    for (const DropProblem& problem : session->dropProblems())
+      names.push_back(problem.file.toStdString());
+    return names;
+  }
   QString book() const { return folder.filePath("book.sqlite"); }
 
   QTemporaryDir folder;

@@ -92,6 +92,40 @@ TEST_F(ASession, BadFilesAreSaidInWordsAndNothingElseChanges) {
   EXPECT_EQ(session->state({"front left", 0}).measured, measured);
 }
 
+TEST_F(ASession, ABadFilesMessageStaysUntilThatFileIsGood) {
+  startCar();
+  drop({write("one.csv", ""), write("two.csv", "Dear customer,\nthe dampers are ready.\n")});
+  drop({sample("car_front_left.csv"), write("three.csv", "")}, "front left");
+  EXPECT_THAT(files(), ElementsAre("one.csv", "two.csv", "three.csv"));
+  drop({write("one.csv", "")});
+  EXPECT_THAT(files(), ElementsAre("two.csv", "three.csv", "one.csv"));
+  drop({write("two.csv", viscousRun(20'000, 150))}, "front right");
+  EXPECT_THAT(files(), ElementsAre("three.csv", "one.csv"));
+}
+
+TEST_F(ASession, AMessageIsDismissedAloneOrWithAllOthers) {
+  startCar();
+  QSignalSpy changed(session.get(), &Session::dropProblemsChanged);
+  drop({write("one.csv", ""), write("two.csv", ""), write("three.csv", "")});
+  const auto before = changed.count();
+  session->dismissDropProblem(1);
+  EXPECT_THAT(files(), ElementsAre("one.csv", "three.csv"));
+  session->dismissDropProblem(2);  // there is none
+  session->dismissDropProblems();
+  EXPECT_THAT(files(), IsEmpty());
+  EXPECT_EQ(changed.count(), before + 2);
+}
+
+TEST_F(ASession, WhatWasSaidOfATakenFileLeavesWithItsJob) {
+  startCar();
+  drop({sample("car_front_left.csv")}, "front left");
+  drop({write("bad.csv", ""), sample("car_front_right.csv")}, "rear left");
+  ASSERT_THAT(files(), UnorderedElementsAre("bad.csv", "car_front_right.csv"));
+  session->startJob({});
+  settle();
+  EXPECT_THAT(files(), ElementsAre("bad.csv"));
+}
+
 TEST_F(ASession, GoodFilesOfADropAreTakenBesideBadOnes) {
   startCar();
   drop({write("empty.csv", ""), sample("car_front_left.csv")}, "front left");
@@ -160,6 +194,18 @@ TEST_F(ASession, AJobDocumentMayNameOnlyRunsOfItsOwnFolder) {
   drop({write("job.json", QByteArray(job).replace("%1", "not there.csv"))});
   EXPECT_THAT(problems(), ElementsAre("file-not-found"));
   EXPECT_FALSE(session->hasJob());
+}
+
+TEST_F(ASession, ProgressAloneChangesNoState) {
+  startCar();
+  QSignalSpy progress(session.get(), &Session::progressChanged);
+  std::vector<double> told;  // how far it was whenever a state changed
+  QObject::connect(session.get(), &Session::stateChanged, [&](const PhaseKey& key) {
+    told.push_back(session->state(key).progress);
+  });
+  drop({write("long.csv", viscousRun(400'000, 150))}, "front left");
+  EXPECT_GT(progress.count(), 0);
+  EXPECT_THAT(told, ElementsAre(0, 1));  // begun, and done
 }
 
 TEST_F(ASession, ALargeDropLeavesTheGuiThreadFree) {
