@@ -98,7 +98,7 @@ void CornerPanel::showPhases(const CornerView* corner) {
     if (&other != corner) others.emplace_back(QString::fromStdString(other.corner), other.name);
   }
   for (std::size_t i = 0; i < count; ++i) {
-    cards_[i]->setView(corner->phases[i], static_cast<int>(i) == view_.selected.phase);
+    cards_[i]->setView(corner->phases[i]);
     cards_[i]->setOtherCorners(others);
   }
 }

@@ -26,9 +26,9 @@ CornerPlace::CornerPlace(QWidget* parent) : QAbstractButton(parent) {
   setCursor(Qt::PointingHandCursor);
 }
 
-void CornerPlace::setView(const CornerView& view, bool selected) {
+void CornerPlace::setView(const CornerView& view) {
   view_ = view;
-  setChecked(selected);
+  setChecked(view.selected);
   const QString verdict = view.busy             ? tr("being measured")
                           : view.broken         ? tr("not readable")
                           : view.verdict        ? verdictName(*view.verdict)

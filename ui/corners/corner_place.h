@@ -14,7 +14,7 @@ class CornerPlace : public QAbstractButton {
  public:
   explicit CornerPlace(QWidget* parent = nullptr);
 
-  void setView(const CornerView& view, bool selected);
+  void setView(const CornerView& view);
   QString promise() const { return promise_; }  ///< what a drop now will do, empty: nothing held
   QSize sizeHint() const override { return {104, 88}; }
 

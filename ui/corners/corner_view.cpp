@@ -47,9 +47,10 @@ PhaseView phaseView(const JobPhase& phase, const DamperCard& damper, const Phase
 
 void takePhases(CornerView& view, const JobItem& item, const Session& session) {
   for (std::size_t i = 0; i < item.phases.size(); ++i) {
-    const PhaseState& state =
-        session.state({QString::fromStdString(view.corner), static_cast<int>(i)});
+    const PhaseKey key{QString::fromStdString(view.corner), static_cast<int>(i)};
+    const PhaseState& state = session.state(key);
     view.phases.push_back(phaseView(item.phases[i], item.damper, state));
+    view.phases.back().selected = key == session.selected();
     view.busy = view.busy || state.busy;
     if (state.busy) view.progress = state.progress;
   }
@@ -77,6 +78,7 @@ CornersView cornersView(const Session& session) {
     CornerView place;
     place.corner = corner;
     place.name = cornerName(corner);
+    place.selected = QString::fromStdString(corner) == view.selected.corner;
     for (const JobItem& item : job.items) {
       if (item.corner != corner) continue;
       place.serial = QString::fromStdString(item.damper.serial);

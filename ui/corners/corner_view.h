@@ -18,6 +18,7 @@ struct PhaseView {
   QStringList files;  ///< names of its run files, in order
   std::optional<VerdictWord> verdict;
   bool busy = false, broken = false;
+  bool selected = false;  ///< its loops and verdict are shown
 };
 
 /// One place on the vehicle.
@@ -27,6 +28,7 @@ struct CornerView {
   std::optional<VerdictWord> verdict;  ///< of its newest phase; nothing while there is none
   bool busy = false, broken = false;   ///< broken: its runs could not be measured
   double progress = 0;                 ///< [1] of the work on it
+  bool selected = false;
   std::vector<PhaseView> phases;
 };
 

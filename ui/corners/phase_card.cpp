@@ -26,9 +26,9 @@ PhaseCard::PhaseCard(QWidget* parent) : QAbstractButton(parent), more_(new QTool
   connect(more_, &QToolButton::clicked, this, &PhaseCard::showMenu);
 }
 
-void PhaseCard::setView(const PhaseView& view, bool selected) {
+void PhaseCard::setView(const PhaseView& view) {
   view_ = view;
-  setChecked(selected);
+  setChecked(view.selected);
   setText(view.title);
   QString spoken = view.title + QStringLiteral(", ") + view.detail;
   if (view.verdict) spoken += QStringLiteral(", ") + verdictName(*view.verdict);

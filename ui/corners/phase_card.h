@@ -15,7 +15,7 @@ class PhaseCard : public QAbstractButton {
  public:
   explicit PhaseCard(QWidget* parent = nullptr);
 
-  void setView(const PhaseView& view, bool selected);
+  void setView(const PhaseView& view);
   /// Places that its runs could move to, as (corner, name).
   void setOtherCorners(const std::vector<std::pair<QString, QString>>& corners);
   QSize sizeHint() const override { return {200, 48}; }

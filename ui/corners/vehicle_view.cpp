@@ -35,10 +35,7 @@ void VehicleView::setView(const CornersView& view) {
   const bool otherPlaces = view.kind != view_.kind || view.corners.size() != places_.size();
   view_ = view;
   if (otherPlaces) rebuild();
-  for (std::size_t i = 0; i < places_.size(); ++i) {
-    const CornerView& corner = view_.corners[i];
-    places_[i]->setView(corner, QString::fromStdString(corner.corner) == view_.selected.corner);
-  }
+  for (std::size_t i = 0; i < places_.size(); ++i) places_[i]->setView(view_.corners[i]);
   update();
 }
 

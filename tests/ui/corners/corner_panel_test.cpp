@@ -29,9 +29,10 @@ CornersView madeView(VehicleKind kind) {
     place.serial = QStringLiteral("DA-%1").arg(serial++);
     place.verdict = VerdictWord::Pass;
     place.phases.push_back(
-        {"As found", "7 speeds · 31 °C", {"run_a.csv"}, VerdictWord::Pass, false, false});
+        {"As found", "7 speeds · 31 °C", {"run_a.csv"}, VerdictWord::Pass, false, false, false});
     view.corners.push_back(place);
   }
+  view.corners.front().selected = view.corners.front().phases.front().selected = true;
   view.selected = {QString::fromStdString(view.corners.front().corner), 0};
   return view;
 }
@@ -102,16 +103,35 @@ TEST_F(CornerPanelTest, AClickOrTheKeyboardSelectsACorner) {
   EXPECT_EQ(picked[1][0].value<PhaseKey>(), (PhaseKey{"rear left", 0}));
 }
 
+TEST_F(CornerPanelTest, TheSelectedCornerIsTheOnlyOneMarked) {
+  const auto marked = [&] {
+    QStringList names;
+    for (const CornerView& corner : view.corners) {
+      const QString key = QString::fromStdString(corner.corner);
+      if (panel.vehicle()->place(key)->isChecked()) names << key;
+    }
+    return names;
+  };
+  EXPECT_EQ(marked(), QStringList("front left"));
+  view.corners[0].selected = false;
+  view.corners[2].selected = true;
+  panel.setView(view);
+  EXPECT_EQ(marked(), QStringList("rear left"));
+}
+
 TEST_F(CornerPanelTest, TheSelectedDampersPhasesAreListed) {
   view.corners[0].phases.push_back({"After work, rebound 8 clicks",
                                     "7 speeds · 33 °C",
                                     {"run_b.csv", "run_c.csv"},
                                     VerdictWord::Fail,
                                     false,
+                                    false,
                                     false});
   panel.setView(view);
   QList<PhaseCard*> cards = panel.findChildren<PhaseCard*>();
   ASSERT_EQ(cards.size(), 2);
+  EXPECT_TRUE(cards[0]->isChecked());
+  EXPECT_FALSE(cards[1]->isChecked());
   EXPECT_TRUE(cards[1]->accessibleName().contains("Fail"));
   QSignalSpy picked(&panel, &CornerPanel::selectWanted);
   QTest::mouseClick(cards[1], Qt::LeftButton, {}, {40, 24});
