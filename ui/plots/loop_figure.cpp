@@ -230,10 +230,9 @@ AxisScale xScale(const LoopFigure& figure) {
   return roomyScale(-reach, reach, mostIntervals);
 }
 
-AxisScale commonForceScale(const LoopFigure& first, const LoopFigure& second) {
+AxisScale commonForceScale(std::initializer_list<const LoopFigure*> figures) {
   Extent extent;
-  takeForces(first, extent);
-  takeForces(second, extent);
+  for (const LoopFigure* figure : figures) takeForces(*figure, extent);
   return roomyScale(extent.low, extent.high, mostIntervals);
 }
 

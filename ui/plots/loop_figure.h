@@ -3,6 +3,7 @@
 #include <QPointF>
 #include <QString>
 #include <cstddef>
+#include <initializer_list>
 #include <vector>
 
 #include "core/measure/measurement.h"
@@ -68,7 +69,7 @@ std::vector<LoopLabel> speedLabels(const LoopFigure& figure, double gap);
 
 /// Scale that holds a figure's x values and zero.
 AxisScale xScale(const LoopFigure& figure);
-/// One force scale for both figures, so that they stand side by side at the same height.
-AxisScale commonForceScale(const LoopFigure& first, const LoopFigure& second);
+/// One force scale for figures that stand side by side at the same height.
+AxisScale commonForceScale(std::initializer_list<const LoopFigure*> figures);
 
 }  // namespace dampwright

@@ -77,7 +77,7 @@ void LoopsView::setMeasured(const std::shared_ptr<const Measured>& measured,
     velocity = loopFigure(FigureKind::ForceVelocity, measured->measurement, limits);
     displacement = loopFigure(FigureKind::ForceDisplacement, measured->measurement, limits);
   }
-  const AxisScale force = commonForceScale(velocity, displacement);
+  const AxisScale force = commonForceScale({&velocity, &displacement});
   forceVelocity_->setFigure(velocity, force);
   forceDisplacement_->setFigure(displacement, force);
   run_->setFigure(runFigure(measured));

@@ -17,6 +17,15 @@ namespace {
 constexpr double panShare = 0.1;
 constexpr double shortestView = 0.02;  // s: closer there is nothing more to see
 
+bool ofSameFiles(const RunFigure& a, const RunFigure& b) {
+  if (a.empty() || b.empty()) return a.empty() == b.empty();
+  return std::ranges::equal(a.measured->measurement.runs,
+                            b.measured->measurement.runs,
+                            [](const MeasuredRun& left, const MeasuredRun& right) {
+                              return left.source.file.sha256 == right.source.file.sha256;
+                            });
+}
+
 }  // namespace
 
 RunPlot::RunPlot(QWidget* parent) : QWidget(parent), canvas_(new PlotCanvas(this)) {
@@ -86,7 +95,8 @@ void RunPlot::connectCanvas() {
 }
 
 void RunPlot::setFigure(const RunFigure& figure) {
-  const bool otherRun = figure.end() != figure_.end();
+  // A rig profile may give the same file another clock.
+  const bool otherRun = !ofSameFiles(figure, figure_) || figure.end() != figure_.end();
   // The same cycle stays chosen when only its state has changed.
   const std::optional<RunCycle> before = chosenCycle();
   figure_ = figure;

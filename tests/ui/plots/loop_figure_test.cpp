@@ -70,7 +70,7 @@ TEST(LoopFigure, BothFiguresShareOneForceScaleThatHoldsEverything) {
   const LoopFigure velocity = loopFigure(FigureKind::ForceVelocity, measured->measurement, nullptr);
   const LoopFigure displacement =
       loopFigure(FigureKind::ForceDisplacement, measured->measurement, nullptr);
-  const AxisScale force = commonForceScale(velocity, displacement);
+  const AxisScale force = commonForceScale({&velocity, &displacement});
   EXPECT_EQ(force.step, 1000);
   EXPECT_LE(force.low, made::forceAt(-1));
   EXPECT_GE(force.high, made::forceAt(1));
@@ -103,7 +103,7 @@ TEST(LoopFigure, TheSummarySaysSpeedsAndForces) {
 TEST(LoopFigure, NothingMeasuredSaysWhatWillStandThere) {
   EXPECT_TRUE(LoopFigure().empty());
   EXPECT_FALSE(figureSummary(LoopFigure()).isEmpty());
-  EXPECT_EQ(commonForceScale({}, {}), niceScale(0, 0, 6));
+  EXPECT_EQ(commonForceScale({}), niceScale(0, 0, 6));
 }
 
 }  // namespace

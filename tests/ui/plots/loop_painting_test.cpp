@@ -39,7 +39,7 @@ TEST(LoopPainting, LoopsSurviveAPhotocopy) {
       loopFigure(FigureKind::ForceVelocity, measured->measurement, &verdict);
   const LoopFigure displacement =
       loopFigure(FigureKind::ForceDisplacement, measured->measurement, &verdict);
-  const AxisScale force = commonForceScale(velocity, displacement);
+  const AxisScale force = commonForceScale({&velocity, &displacement});
   for (const LoopFigure* figure : {&velocity, &displacement}) {
     const QImage paper = painted(*figure, force);
     if (qEnvironmentVariableIsSet("DAMPWRIGHT_SHOTS"))
@@ -64,7 +64,7 @@ TEST(LoopPainting, NothingRunsOutOfItsArea) {
   QPainter painter(&paper);
   const QRect area(100, 100, 800, 600);
   paintLoopFigure(
-      painter, area, figure, commonForceScale(figure, figure), {2.8 * pixelsPerMm, pixelsPerMm});
+      painter, area, figure, commonForceScale({&figure}), {2.8 * pixelsPerMm, pixelsPerMm});
   painter.end();
   for (const QRect& margin : {QRect(0, 0, 1000, 98),
                               QRect(0, 702, 1000, 98),

@@ -139,6 +139,19 @@ TEST_F(LoopsViewTest, ACycleIsStruckOutByKeyAndPutBack) {
   EXPECT_EQ(back.count(), 1);
 }
 
+TEST_F(LoopsViewTest, AnotherFileOfTheSameLengthIsShownFromItsStart) {
+  fill();
+  view.run()->chooseCycle(1);
+  QTest::keyClick(canvasOf(view.run()), Qt::Key_Plus);
+  const auto whole = std::pair(0.0, view.run()->figure().end());
+  ASSERT_NE(view.run()->timeRange(), whole);
+  const auto mate = std::make_shared<Measured>(*measured);
+  mate->measurement.runs[0].source.file = {"front_right.csv", std::string(64, 'b'), 1000};
+  view.setMeasured(mate, made::verdict());
+  EXPECT_EQ(view.run()->timeRange(), whole);
+  EXPECT_FALSE(view.run()->chosenCycle());
+}
+
 TEST_F(LoopsViewTest, TheRunStaysInsideItsTime) {
   fill();
   QWidget* canvas = canvasOf(view.run());
