@@ -37,6 +37,8 @@ void JobPage::connectParts() {
   connect(corners_, &CornerPanel::damperWanted, this, &JobPage::damperWanted);
   connect(verdict_, &VerdictPanel::limitsChosen, &session_, &Session::chooseLimits);
   connect(verdict_, &VerdictPanel::limitsFileWanted, this, &JobPage::limitsFileWanted);
+  connect(verdict_, &VerdictPanel::dismissed, &session_, &Session::dismissDropProblem);
+  connect(verdict_, &VerdictPanel::allDismissed, &session_, &Session::dismissDropProblems);
   connect(verdict_, &VerdictPanel::sheetWanted, this, &JobPage::sheetWanted);
   connect(verdict_, &VerdictPanel::directionSettled, this, [this](Direction direction) {
     session_.settleDirection(session_.selected(), direction);
@@ -59,21 +61,25 @@ void JobPage::followSession() {
     refreshLoops();
   });
   connect(&session_, &Session::stateChanged, this, [this](const PhaseKey& key) {
-    refreshSides();
-    // Progress alone moves nothing in the plots: they keep what is pointed at.
-    if (key == session_.selected() && !session_.state(key).busy) refreshLoops();
+    refreshCorners();
+    if (key != session_.selected()) return;
+    refreshVerdict();
+    // The plots keep what is pointed at until there is something else to draw.
+    if (!session_.state(key).busy) refreshLoops();
   });
-  connect(&session_, &Session::limitsKnownChanged, this, &JobPage::refreshSides);
-  connect(&session_, &Session::dropProblemsChanged, this, [this] {
-    verdict_->showDismissed();
-    refreshSides();
-  });
+  connect(&session_, &Session::progressChanged, this, &JobPage::refreshCorners);
+  connect(&session_, &Session::limitsKnownChanged, this, &JobPage::refreshVerdict);
+  connect(&session_, &Session::dropProblemsChanged, this, &JobPage::refreshVerdict);
 }
 
 void JobPage::refreshSides() {
-  corners_->setView(cornersView(session_));
-  verdict_->setView(verdictView(session_));
+  refreshCorners();
+  refreshVerdict();
 }
+
+void JobPage::refreshCorners() { corners_->setView(cornersView(session_)); }
+
+void JobPage::refreshVerdict() { verdict_->setView(verdictView(session_)); }
 
 void JobPage::refreshLoops() {
   if (!session_.hasJob()) return loops_->setMeasured(nullptr, std::nullopt);

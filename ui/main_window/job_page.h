@@ -31,6 +31,8 @@ class JobPage : public QWidget {
   void connectParts();
   void followSession();
   void refreshSides();
+  void refreshCorners();
+  void refreshVerdict();
   void refreshLoops();
 
   Session& session_;

@@ -59,6 +59,7 @@ WorkStatus::WorkStatus(Session& session, QWidget* parent)
   connect(&patience_, &QTimer::timeout, this, [this] { setVisible(session_.busy()); });
   connect(stop_, &QPushButton::clicked, &session_, &Session::stopWork);
   connect(&session_, &Session::stateChanged, this, &WorkStatus::refresh);
+  connect(&session_, &Session::progressChanged, this, &WorkStatus::refresh);
   connect(&session_, &Session::jobChanged, this, &WorkStatus::refresh);
   connect(&session_, &Session::idle, this, &WorkStatus::refresh);
   hide();

@@ -3,6 +3,7 @@
 
 #include <QStringList>
 #include <algorithm>
+#include <utility>
 
 #include "ui/text/check_text.h"
 
@@ -24,17 +25,25 @@ int pressing(VerdictWord word) {
   return 4;
 }
 
+bool asksTheSame(const std::vector<CheckVerdict>& a, const std::vector<CheckVerdict>& b) {
+  return std::ranges::equal(a, b, {}, &CheckVerdict::check, &CheckVerdict::check);
+}
+
 }  // namespace
 
 ChecksModel::ChecksModel(QObject* parent) : QAbstractTableModel(parent) {}
 
 void ChecksModel::setVerdict(const std::optional<Verdict>& verdict) {
-  beginResetModel();
-  checks_ = verdict ? verdict->checks : std::vector<CheckVerdict>{};
-  std::stable_sort(checks_.begin(), checks_.end(), [](const auto& a, const auto& b) {
-    return pressing(a.verdict) < pressing(b.verdict);
-  });
-  endResetModel();
+  std::vector<CheckVerdict> checks = verdict ? verdict->checks : std::vector<CheckVerdict>{};
+  std::ranges::stable_sort(checks, {}, [](const auto& check) { return pressing(check.verdict); });
+  if (asksTheSame(checks, checks_)) {
+    checks_ = std::move(checks);
+    if (!checks_.empty()) emit dataChanged(index(0, 0), index(rowCount() - 1, ColumnCount - 1));
+  } else {
+    beginResetModel();
+    checks_ = std::move(checks);
+    endResetModel();
+  }
 }
 
 int ChecksModel::rowCount(const QModelIndex& parent) const {

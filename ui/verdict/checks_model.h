@@ -17,6 +17,7 @@ class ChecksModel : public QAbstractTableModel {
 
   explicit ChecksModel(QObject* parent = nullptr);
 
+  /// Rows that ask the same as before keep their place, and with it selection and scroll.
   void setVerdict(const std::optional<Verdict>& verdict);
   const CheckVerdict& check(int row) const { return checks_[static_cast<std::size_t>(row)]; }
 

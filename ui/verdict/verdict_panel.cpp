@@ -1,11 +1,14 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/verdict/verdict_panel.h"
 
+#include <QAbstractItemView>
+#include <QEvent>
 #include <QHBoxLayout>
 #include <QLabel>
 #include <QPushButton>
 #include <QVBoxLayout>
 #include <algorithm>
+#include <utility>
 
 #include "ui/look/elided.h"
 #include "ui/look/type.h"
@@ -51,18 +54,23 @@ VerdictPanel::VerdictPanel(QWidget* parent)
       limits_(new ElidedComboBox),
       checks_(new ChecksTable),
       notices_(new NoticeList),
+      dismissAll_(new QPushButton(tr("Dismiss all"))),
       sheet_(new QPushButton(tr("Print sheet…"))) {
   setObjectName(QStringLiteral("card"));
   setFixedWidth(332);
   line_->setWordWrap(true);
   limits_->setAccessibleName(tr("Limits"));
+  limits_->view()->installEventFilter(this);
+  dismissAll_->setObjectName(QStringLiteral("link"));
+  dismissAll_->setToolTip(tr("Put away what is said of files that were dropped"));
   sheet_->setObjectName(QStringLiteral("primary"));
   sheet_->setMinimumHeight(40);
   buildColumn();
   connect(limits_, &QComboBox::activated, this, &VerdictPanel::pickLimits);
   connect(sheet_, &QPushButton::clicked, this, &VerdictPanel::sheetWanted);
   connect(notices_, &NoticeList::directionSettled, this, &VerdictPanel::directionSettled);
-  connect(notices_, &NoticeList::dismissed, this, &VerdictPanel::dismiss);
+  connect(notices_, &NoticeList::dismissed, this, &VerdictPanel::dismissed);
+  connect(dismissAll_, &QPushButton::clicked, this, &VerdictPanel::allDismissed);
 }
 
 void VerdictPanel::buildColumn() {
@@ -75,6 +83,9 @@ void VerdictPanel::buildColumn() {
   checksRow->addWidget(checksHeading_);
   checksRow->addStretch();
   checksRow->addWidget(rule_);
+  auto* notesRow = new QHBoxLayout;
+  notesRow->addWidget(notesHeading_, 1);
+  notesRow->addWidget(dismissAll_);
   auto* column = new QVBoxLayout(this);
   column->setContentsMargins(16, 16, 16, 16);
   column->setSpacing(8);
@@ -84,7 +95,7 @@ void VerdictPanel::buildColumn() {
   column->addLayout(limitsRow);
   column->addLayout(checksRow);
   column->addWidget(checks_);
-  column->addWidget(notesHeading_);
+  column->addLayout(notesRow);
   column->addWidget(notices_, 1);
   column->addStretch();  // keeps all this together where there is nothing to remark
   column->addWidget(sheet_);
@@ -106,25 +117,12 @@ void VerdictPanel::setView(const VerdictView& view) {
 }
 
 void VerdictPanel::showNotices() {
-  std::vector<NoticeView> shown;
-  for (const NoticeView& notice : view_.notices) {
-    const bool away = std::find(dismissed_.begin(), dismissed_.end(), notice) != dismissed_.end();
-    if (!away) shown.push_back(notice);
-  }
-  notices_->setNotices(shown);
-  notices_->setVisible(!shown.empty());
-  notesHeading_->setVisible(!shown.empty());
+  notices_->setNotices(view_.notices);
+  notices_->setVisible(!view_.notices.empty());
+  notesHeading_->setVisible(!view_.notices.empty());
+  const auto files = std::ranges::count(view_.notices, NoticeAction::Dismiss, &NoticeView::action);
+  dismissAll_->setVisible(files > 1);
 }
-
-void VerdictPanel::dismiss(int problem) {
-  for (const NoticeView& notice : view_.notices) {
-    if (notice.action == NoticeAction::Dismiss && notice.index == problem)
-      dismissed_.push_back(notice);
-  }
-  showNotices();
-}
-
-void VerdictPanel::showDismissed() { dismissed_.clear(); }
 
 void VerdictPanel::showRule() {
   if (!view_.verdict || view_.verdict->checks.empty()) return rule_->clear();
@@ -138,28 +136,38 @@ void VerdictPanel::showRule() {
 }
 
 void VerdictPanel::showLimits() {
+  limits_->setEnabled(view_.hasJob);
+  if (limits_->view()->isVisible()) return;  // somebody chooses: again when the list is closed
+  std::vector<Limits> offered = view_.known;
+  if (view_.chosen && std::ranges::find(offered, *view_.chosen) == offered.end())
+    offered.insert(offered.begin(), *view_.chosen);
   const QSignalBlocker blocker(limits_);
+  if (limits_->count() == 0 || offered != offered_) {
+    offered_ = std::move(offered);
+    fillLimits();
+  }
+  const auto row = view_.chosen ? std::ranges::find(offered_, *view_.chosen) : offered_.end();
+  limits_->setCurrentIndex(row == offered_.end() ? -1 : static_cast<int>(row - offered_.begin()));
+  limits_->setToolTip(limits_->currentText());
+}
+
+void VerdictPanel::fillLimits() {
   limits_->clear();
-  int current = -1;
-  for (const Limits& limits : view_.known) {
-    if (view_.chosen && limits == *view_.chosen) current = limits_->count();
-    limits_->addItem(limitsName(limits));
-  }
-  if (view_.chosen && current < 0) {
-    current = 0;
-    limits_->insertItem(0, limitsName(*view_.chosen));
-    view_.known.insert(view_.known.begin(), *view_.chosen);
-  }
+  for (const Limits& limits : offered_) limits_->addItem(limitsName(limits));
   limits_->addItem(tr("From file…"));
   limits_->setPlaceholderText(tr("Choose limits"));
-  limits_->setCurrentIndex(current);
-  limits_->setToolTip(limits_->currentText());
-  limits_->setEnabled(view_.hasJob);
+}
+
+// Queued, because the list closes before it says what was chosen.
+bool VerdictPanel::eventFilter(QObject* watched, QEvent* event) {
+  if (event->type() == QEvent::Hide)
+    QMetaObject::invokeMethod(this, &VerdictPanel::showLimits, Qt::QueuedConnection);
+  return QFrame::eventFilter(watched, event);
 }
 
 void VerdictPanel::pickLimits(int row) {
-  if (row >= 0 && row < static_cast<int>(view_.known.size())) {
-    emit limitsChosen(view_.known[static_cast<std::size_t>(row)]);
+  if (row >= 0 && row < static_cast<int>(offered_.size())) {
+    emit limitsChosen(offered_[static_cast<std::size_t>(row)]);
   } else {
     showLimits();  // "From file" is no choice by itself
     emit limitsFileWanted();

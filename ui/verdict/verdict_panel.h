@@ -24,33 +24,37 @@ class VerdictPanel : public QFrame {
   explicit VerdictPanel(QWidget* parent = nullptr);
 
   void setView(const VerdictView& view);
-  void showDismissed();  ///< what was put away is shown again: the files are others now
-  void takeFocus();      ///< to the checks, or to the limits while there are none
-  void openLimits();     ///< opens the list of limit sheets, for the action in menu and top bar
+  void takeFocus();   ///< to the checks, or to the limits while there are none
+  void openLimits();  ///< opens the list of limit sheets, for the action in menu and top bar
 
  signals:
   void limitsChosen(const dampwright::Limits& limits);
   void limitsFileWanted();
   void directionSettled(dampwright::Direction displacementPositive);
+  void dismissed(int problem);  ///< index of a drop problem
+  void allDismissed();
   void sheetWanted();
+
+ protected:
+  bool eventFilter(QObject* watched, QEvent* event) override;
 
  private:
   void buildColumn();
   void showLimits();
+  void fillLimits();
   void showNotices();
-  void dismiss(int problem);
   void pickLimits(int row);
   void showRule();
 
   VerdictView view_;
-  std::vector<NoticeView> dismissed_;
+  std::vector<Limits> offered_;  // the rows of the list, in its order
   StampBanner* stamp_;
   ElidedLabel* damper_;
   QLabel *line_, *rule_, *checksHeading_, *notesHeading_;
   ElidedComboBox* limits_;
   ChecksTable* checks_;
   NoticeList* notices_;
-  QPushButton* sheet_;
+  QPushButton *dismissAll_, *sheet_;
 };
 
 }  // namespace dampwright

@@ -13,7 +13,7 @@ namespace dampwright {
 enum class NoticeAction {
   None,
   SettleDirection,  ///< two answers: rising displacement is compression, or rebound
-  Dismiss           ///< a file that was not taken: read and put away
+  Dismiss           ///< a file that was dropped: read and put away
 };
 
 struct NoticeView {

@@ -3,6 +3,7 @@
 
 #include <gtest/gtest.h>
 
+#include <QAbstractItemView>
 #include <QComboBox>
 #include <QLabel>
 #include <QPushButton>
@@ -125,13 +126,59 @@ TEST_F(VerdictPanelTest, AWrongFileSaysWhyInPlaceAndIsPutAway) {
   panel.setView(view);
   EXPECT_TRUE(everythingSaid().contains("holiday.jpg"));
   EXPECT_TRUE(everythingSaid().contains("This is a picture"));
+  EXPECT_EQ(button("Dismiss all"), nullptr);  // one has a button of its own
+  QSignalSpy dismissed(&panel, &VerdictPanel::dismissed);
   QTest::mouseClick(button("Dismiss"), Qt::LeftButton);
-  EXPECT_FALSE(everythingSaid().contains("holiday.jpg"));
-  panel.setView(view);  // it stays away while the session still knows it
-  EXPECT_FALSE(everythingSaid().contains("holiday.jpg"));
-  panel.showDismissed();
+  ASSERT_EQ(dismissed.count(), 1);
+  EXPECT_EQ(dismissed[0][0].toInt(), 0);
+  view.notices.clear();
   panel.setView(view);
-  EXPECT_TRUE(everythingSaid().contains("holiday.jpg"));
+  EXPECT_FALSE(everythingSaid().contains("holiday.jpg"));
+}
+
+TEST_F(VerdictPanelTest, SeveralWrongFilesStandBelowEachOtherAndArePutAwayTogether) {
+  view.notices = {{"a.csv", "It is empty.", {}, true, NoticeAction::Dismiss, 0},
+                  {"b.csv", "It holds no numbers.", {}, true, NoticeAction::Dismiss, 1}};
+  panel.setView(view);
+  EXPECT_TRUE(everythingSaid().contains("a.csv"));
+  EXPECT_TRUE(everythingSaid().contains("b.csv"));
+  QSignalSpy all(&panel, &VerdictPanel::allDismissed);
+  QTest::mouseClick(button("Dismiss all"), Qt::LeftButton);
+  EXPECT_EQ(all.count(), 1);
+}
+
+TEST_F(VerdictPanelTest, ANewVerdictOfTheSameChecksKeepsTheSelectedRow) {
+  auto* checks = panel.findChild<ChecksTable*>();
+  checks->selectRow(2);
+  view.verdict->checks[0].measured = 601;
+  panel.setView(view);
+  ASSERT_EQ(checks->selectionModel()->selectedRows().size(), 1);
+  EXPECT_EQ(checks->selectionModel()->selectedRows()[0].row(), 2);
+  const QModelIndex measured = checks->model()->index(1, ChecksModel::Measured);
+  EXPECT_TRUE(measured.data().toString().contains("601")) << qPrintable(measured.data().toString());
+}
+
+TEST_F(VerdictPanelTest, TheListOfLimitsStaysAsItIsWhileSomebodyChooses) {
+  QSignalSpy chosen(&panel, &VerdictPanel::limitsChosen);
+  auto* box = panel.findChild<QComboBox*>();
+  panel.openLimits();
+  ASSERT_TRUE(QTest::qWaitFor([&] { return box->view()->isVisible(); }));
+  view.known.insert(view.known.begin(), named("Bus limits"));
+  panel.setView(view);
+  EXPECT_EQ(box->count(), 3);
+  box->view()->setCurrentIndex(box->model()->index(1, 0));
+  QTest::keyClick(box->view(), Qt::Key_Return);
+  ASSERT_EQ(chosen.count(), 1);
+  EXPECT_EQ(chosen[0][0].value<Limits>().title, "Motorcycle limits");
+  EXPECT_TRUE(QTest::qWaitFor([&] { return box->count() == 4; }));
+  EXPECT_EQ(box->currentText(), "Car limits");  // until the session says another
+}
+
+TEST_F(VerdictPanelTest, TheSameLimitsAreNotFilledInAgain) {
+  auto* box = panel.findChild<QComboBox*>();
+  QSignalSpy filled(box->model(), &QAbstractItemModel::rowsInserted);
+  panel.setView(view);
+  EXPECT_EQ(filled.count(), 0);
 }
 
 TEST_F(VerdictPanelTest, AFilesWordsAreNeverMarkup) {
