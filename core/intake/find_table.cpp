@@ -2,6 +2,8 @@
 #include "core/intake/find_table.h"
 
 #include <algorithm>
+#include <array>
+#include <utility>
 
 #include "core/intake/column_words.h"
 #include "core/intake/letters.h"
@@ -163,6 +165,45 @@ std::string cellText(const std::optional<HeaderRow>& row, std::size_t column) {
   return row && column < row->cells.size() ? plainText(row->cells[column]) : std::string();
 }
 
+// A line of units above the header that says so in its first cell: "Unit;s;mm;N", "Einheit". It has
+// a cell for each column, or one more.
+bool isUnitLine(const Cells& cells, const Dialect& dialect) {
+  if (cells.size() < 2 || cells.front().text.empty()) return false;
+  const std::string label = folded(plainText(cells.front()));
+  constexpr std::array<std::string_view, 7> words{"unit",
+                                                  "einheit",
+                                                  "unidad",
+                                                  "eenheid",
+                                                  "単位",
+                                                  "单位",
+                                                  "單位"};  // also unité, unità, unidade
+  const bool says = std::any_of(words.begin(), words.end(), [&](std::string_view word) {
+    return label.find(word) != label.npos;
+  });
+  const bool known = std::any_of(cells.begin() + 1, cells.end(), [](const Cell& cell) {
+    return readUnit(cell.text).has_value();
+  });
+  return says && known && cells.size() <= dialect.columns + 1;
+}
+
+// Units from such a line for the columns that have none.
+std::vector<NameAndUnit> withUnitLine(std::vector<NameAndUnit> columns,
+                                      const std::vector<Line>& above,
+                                      const Dialect& dialect) {
+  for (const Line& line : above) {
+    const Cells cells = splitRow(line.text, dialect.delimiter);
+    if (!isUnitLine(cells, dialect)) continue;
+    const std::size_t shift = cells.size() > columns.size() ? 1 : 0;
+    for (std::size_t column = 0; column < columns.size(); ++column) {
+      const std::size_t cell = column + shift;
+      if (cell == 0 || cell >= cells.size() || !columns[column].unit.empty()) continue;
+      const std::string unit(withoutBrackets(plainText(cells[cell])));
+      if (!isMissing(unit)) columns[column].unit = unit;
+    }
+  }
+  return columns;
+}
+
 std::vector<NameAndUnit> columnsOf(const Heading& heading, const Dialect& dialect) {
   std::vector<NameAndUnit> columns;
   for (std::size_t column = 0; column < dialect.columns; ++column) {
@@ -235,7 +276,9 @@ Result<Table> findTable(std::string_view text,
   if (heading.units) table.unitRow = lines[heading.units->line].number;
   table.firstDataRow = lines[data].number;
   table.firstDataByte = static_cast<std::size_t>(lines[data].text.data() - text.data());
-  table.metadata = readMetadata(linesAbove(lines, data, heading), dialect.delimiter);
+  const std::vector<Line> above = linesAbove(lines, data, heading);
+  table.columns = withUnitLine(std::move(table.columns), above, dialect);
+  table.metadata = readMetadata(above, dialect.delimiter);
   return table;
 }
 
