@@ -2,10 +2,12 @@
 #include "core/measure/run_blocks.h"
 
 #include <algorithm>
+#include <iterator>
 
 #include "core/condition/condition.h"
 #include "core/curves/read_block.h"
 #include "core/cycles/find_blocks.h"
+#include "core/measure/range_remarks.h"
 
 namespace dampwright {
 namespace {
@@ -88,6 +90,8 @@ Result<ReadRun> readRunBlocks(const Trace& trace,
   read.run.directionSettled = trace.directionSettled;
   read.run.struckOut = cycleOptions.struckOut;
   read.run.remarks = remarksOf(trace, motion.value(), read.blocks);
+  std::ranges::move(rangeRemarks(trace, read.blocks, options.rig.loadCell, options.card),
+                    std::back_inserter(read.run.remarks));
   read.motion = std::move(motion).value();
   return read;
 }

@@ -58,6 +58,17 @@ constexpr Sentence rows[] = {
     {"block-absorbs-no-energy",
      "In the block at {start} the damper gives energy instead of taking it.",
      "Check the sign of the force and the delay between the channels."},
+    {"stroke-beyond-damper",
+     "The recording strokes {stroke}, but by its card the damper has {travel} only.",
+     "Check the unit of displacement, and the lengths on the damper card."},
+    {"force-beyond-cell",
+     "The force goes up to {force}, beyond the {capacity} of the load cell, in {count} rows, first "
+     "in row {first_row}.",
+     "Check the unit of force; if it is right, the cell was overloaded: have it checked, and use a "
+     "larger one."},
+    {"motion-implausible",
+     "A stroke of {stroke} at {speed} is more than a damper bench does.",
+     "Check the units of displacement and time."},
     {"few-speeds",
      "Speeds tested: {speeds} only, so the curve between them is uncertain.",
      "Test at five speeds or more."},
