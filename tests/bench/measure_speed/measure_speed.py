@@ -40,7 +40,7 @@ def made_run():
         v.append(0 * rest)
 
     speeds = [0.05, 0.1, 0.2, 0.3, 0.5, 0.7, 1.0]
-    block(0.005, 2)
+    block(0.005, 3)
     slow_rows = sum(len(one) for one in x)
     per_cycle = sum(2 * np.pi * 0.025 / s * RATE for s in speeds)
     cycles = (ROWS - slow_rows - 1000 * len(speeds)) / per_cycle
