@@ -166,7 +166,8 @@ GasAndFriction identifyGasAndFriction(Blocks blocks, const IdentifyOptions& opti
   const BlockToIdentify* least = slowest(blocks, [](const BlockToIdentify&) { return true; });
   if (hold != nullptr && !hidden) {
     const double difference = least != nullptr ? std::abs(halfDifference(*least, gas)) : 0;
-    gas = gasOfHold(gas, *hold->block, friction.dry.value_or(difference));
+    const Gas held = gasOfHold(gas, *hold->block, friction.dry.value_or(difference));
+    if (!gas.force || !(gas.forceU <= held.forceU)) gas = held;
   }
   if (hidden) gas.reason = "zeroed-with-damper";
   if (anySlow != nullptr) setHalfDifference(friction, *anySlow, gas);

@@ -28,10 +28,11 @@ struct GasAndFriction {
 
 /// Gas and dry friction, the limits of force for speed → 0.
 ///
-/// From the slowest block up to `slowSpeed` that is no triangle, see fitSlowBlock. A hold is
-/// preferred for the gas: its force, moved along the column to the slow block's mid-stroke; its
-/// uncertainty holds ±Fc as limits (without a slow block: ± half the force difference of the
-/// slowest block, which dry friction does not exceed). Of several holds the one nearest to
+/// From the slowest block up to `slowSpeed` that is no triangle, see fitSlowBlock. The gas comes
+/// from it or from a hold, whichever has the smaller standard uncertainty: a hold's force is moved
+/// along the column to the slow block's mid-stroke; its uncertainty holds ±Fc as limits (without a
+/// slow block: ± half the force difference of the slowest block, which dry friction does not
+/// exceed). Of several holds the one nearest to
 /// mid-stroke. The half difference at the slowest block's peak speed stands beside the dry
 /// friction, gas taken off where its two readings stand; a slow triangle gives only that.
 ///

@@ -26,6 +26,8 @@ constexpr double significant = 2;     // standard errors, for 1/L to be kept
 
 // Order of the parameters.
 enum Parameter : Index { Force, Shape, Dry, Change, CompressionSlope, ReboundSlope, Count };
+// Behind them in the richer model: a valve that is not straight at low speed, N at the peak speed.
+enum Curve : Index { CompressionCurve = Count, ReboundCurve, RichCount };
 
 struct Samples {
   VectorXd x, v, force;
@@ -66,6 +68,7 @@ struct Model {
   GasShape shape;
   double exponent;
 
+  double curve(double v) const { return v * std::abs(v) / std::pow(samples.peakSpeed, 2); }
   GasColumn columnOf(const VectorXd& b) const { return {b[Force], b[Shape], exponent}; }
 
   VectorXd residuals(const VectorXd& b) const {
@@ -77,13 +80,14 @@ struct Model {
       const double gas = shape == GasShape::Column ? columnOf(b).at(x) : b[Force] + b[Shape] * x;
       const double slope = v > 0 ? b[CompressionSlope] : b[ReboundSlope];
       r[i] = gas + friction.at(v) + slope * v - samples.force[i];
+      if (b.size() == RichCount) r[i] += b[v > 0 ? CompressionCurve : ReboundCurve] * curve(v);
     }
     return r;
   }
 
   MatrixXd jacobian(const VectorXd& b) const {
     const DryFriction friction{b[Dry], b[Change]};
-    MatrixXd j = MatrixXd::Zero(samples.x.size(), Count);
+    MatrixXd j = MatrixXd::Zero(samples.x.size(), b.size());
     for (Index i = 0; i < j.rows(); ++i) {
       const double x = samples.x[i];
       const double v = samples.v[i];
@@ -95,6 +99,7 @@ struct Model {
       j(i, Dry) = dry.byForce;
       j(i, Change) = dry.byChangeSpeed;
       j(i, v > 0 ? CompressionSlope : ReboundSlope) = v;
+      if (b.size() == RichCount) j(i, v > 0 ? CompressionCurve : ReboundCurve) = curve(v);
     }
     return j;
   }
@@ -161,6 +166,35 @@ FitSummary fitFullestModel(const Model& model) {
     if (found.usable()) break;
   }
   return found;
+}
+
+/// What a bend of the valve's law at low speed would do to gas force and dry friction: their
+/// standard uncertainties from the distance to a fit that has one, less what noise alone puts
+/// between both fits.
+struct FormDoubt {
+  double gas = 0, dry = 0;
+};
+
+FormDoubt formDoubt(const Model& model, const FitSummary& found, double widening) {
+  LeastSquaresProblem problem{[&](const VectorXd& b) { return model.residuals(b); },
+                              [&](const VectorXd& b) { return model.jacobian(b); },
+                              VectorXd::Constant(RichCount, -infinite),
+                              VectorXd::Constant(RichCount, infinite)};
+  const double peak = model.samples.peakSpeed;
+  problem.lower[Dry] = 0;
+  problem.lower[Change] = smallestChange * peak;
+  problem.upper[Change] = largestChange * peak;
+  VectorXd start = VectorXd::Zero(RichCount);
+  start.head(Count) = found.parameters;
+  const FitSummary rich = fitLeastSquares(problem, start);
+  if (!rich.usable()) return {};
+  const auto doubt = [&](Parameter which) {
+    const double distance = rich.parameters[which] - found.parameters[which];
+    const double noise = std::pow(widening * rich.standardErrors[which], 2) -
+                         std::pow(widening * found.standardErrors[which], 2);
+    return std::sqrt(std::max(0.0, distance * distance - std::max(0.0, noise)));
+  };
+  return {doubt(Force), doubt(Dry)};
 }
 
 /// Standard error of the dry friction, as if no bound held another parameter. Where the friction
@@ -230,11 +264,12 @@ SlowBlockFit fitSlowBlock(const Block& block, GasShape shape, double exponent) {
   const double ratePerShape = shape == GasShape::Column ? b[Force] * exponent : 1;
   out.status = found.status;
   out.gas = {b[Force], kept ? b[Shape] : 0, exponent};
-  out.gasU = widening * found.standardErrors[Force];
+  const FormDoubt form = found.usable() ? formDoubt(model, found, widening) : FormDoubt{};
+  out.gasU = std::hypot(widening * found.standardErrors[Force], form.gas);
   out.rate = ratePerShape * b[Shape];
   out.rateU = std::hypot(ratePerShape * shapeU, doubt / samples.amplitude);
   out.friction = {b[Dry], b[Change]};
-  out.dryU = std::hypot(widening * dryError(model, found), doubt);
+  out.dryU = std::hypot(widening * dryError(model, found), std::max(doubt, form.dry));
   const auto count = static_cast<double>(samples.x.size());
   out.dof = std::max(1.0, count / (widening * widening) - (count - found.dof));
   out.rms = std::sqrt(found.rss / count);

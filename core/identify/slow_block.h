@@ -19,6 +19,9 @@ enum class GasShape {
 /// correlation r) as fewer points, n·(1 − r)/(1 + r). Such residuals mean that friction has another
 /// form than the fitted one, which gas rate and friction then share between them: r times the
 /// distance to the half difference at a quarter of the peak speed is a limit of error of both.
+/// A valve whose law bends at low speed (an orifice, a power of v) moves both: the distance to a
+/// fit with c_dir·v + d_dir·v·|v|, less what noise puts between the two fits, is a standard
+/// uncertainty of each.
 struct SlowBlockFit {
   FitStatus status = FitStatus::NotConverged;
   GasColumn gas;  ///< x from the block's mid-stroke; inverseLength 0 where |1/L| < 2 errors

@@ -31,7 +31,7 @@ DrawnLaw knownLaw(Random& random, double size) {
     case 0:
       return {bench::linearLaw(high), "linear", {high}};
     case 1: {
-      const double exponent = between(random, 0.5, 1.4);
+      const double exponent = between(random, 0.85, 1.6);
       return {bench::powerLaw(low / 2, exponent), "power", {low / 2, exponent}};
     }
     case 2:

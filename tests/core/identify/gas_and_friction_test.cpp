@@ -4,6 +4,7 @@
 #include <gtest/gtest.h>
 
 #include <cmath>
+#include <random>
 
 #include "tests/core/identify/made_run.h"
 
@@ -37,18 +38,29 @@ TEST(IdentifyGasAndFriction, ASlowSineGivesBoth) {
   EXPECT_EQ(friction.reason, "");
 }
 
-TEST(IdentifyGasAndFriction, AHoldIsPreferredForTheGas) {
+TEST(IdentifyGasAndFriction, OfHoldAndSlowBlockTheOneKnownBetterGivesTheGas) {
   test::MadeRun run;
   run.add(model, slow());
   run.addHold(0.014, model(0.014, 0) + 3, 0.1);  // the hold stands 3 N off, held by friction
   const auto [gas, friction] = identifyGasAndFriction(run.items());
   ASSERT_TRUE(gas.force);
-  EXPECT_EQ(gas.method, "hold");
-  EXPECT_NEAR(*gas.force, 163, 0.3);  // moved along the column: a little less than 3 N off
-  EXPECT_EQ(gas.mid, 0.01);
-  EXPECT_NEAR(gas.forceU, 24 / std::sqrt(3.0), 1);  // ±Fc as limits
-  EXPECT_TRUE(std::isinf(gas.forceDof));
+  EXPECT_EQ(gas.method, "slow block");  // ±24 N of friction are in the hold
+  EXPECT_NEAR(*gas.force, 160, 1e-5);
   EXPECT_NEAR(*friction.dry, 24, 1e-5);
+
+  // A rough loop whose step at the reversal is the wrong way round, so that no friction is found.
+  std::mt19937 random(3);
+  std::normal_distribution<double> scatter(0, 10);
+  test::MadeRun rough;
+  const auto force = [&](double x, double v) {
+    return 160 + 400 * x + 1500 * v - 8 * std::tanh(v / 3e-4) + scatter(random);
+  };
+  rough.add(force, slow());
+  rough.addHold(0.01, 161, 0.1);
+  const Gas held = identifyGasAndFriction(rough.items()).gas;
+  EXPECT_EQ(held.method, "hold");
+  EXPECT_NEAR(*held.force, 161, 1e-9);
+  EXPECT_TRUE(std::isinf(held.forceDof));
 }
 
 TEST(IdentifyGasAndFriction, ARigAtRestAtTheEndOfItsStrokeIsNoHoldBesideASlowBlock) {
