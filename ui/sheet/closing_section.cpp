@@ -68,7 +68,7 @@ SheetBlock signatures(const SheetContent& content) {
     line(Sheet::tr("Authorised by (name and signature)"), {});
     line(Sheet::tr("Date"), {});
   };
-  return {13.4, paint, false, {}, false};
+  return {12.4, paint, false, {}, false};
 }
 
 }  // namespace

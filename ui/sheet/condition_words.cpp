@@ -33,7 +33,7 @@ QString eachOnce(const Values& values, Text text) {
 
 bool isHold(const MeasuredBlock& block) { return block.block.kind == BlockKind::Hold; }
 
-QString motionText(const Measurement& measurement) {
+QStringList motionTexts(const Measurement& measurement) {
   std::vector<double> speeds;
   for (const MeasuredBlock& block : measurement.blocks) {
     if (!isHold(block)) {
@@ -51,7 +51,9 @@ QString motionText(const Measurement& measurement) {
   const QString kinds = eachOnce(measurement.blocks, [](const MeasuredBlock& block) {
     return blockKindName(block.block.kind);
   });
-  return Sheet::tr("peak speeds %1; stroke %2; waveform %3").arg(list + unit, strokes, kinds);
+  return {Sheet::tr("peak speeds %1").arg(list + unit),
+          Sheet::tr("stroke %1").arg(strokes),
+          Sheet::tr("waveform %1").arg(kinds)};
 }
 
 QString temperatureText(const Measurement& measurement) {
@@ -94,7 +96,7 @@ QString gasText(const Gas& gas) {
   return Sheet::tr("gas force %1 %2").arg(quantityText(*gas.force, Quantity::Force), method);
 }
 
-QString forceText(const SheetPhase& phase) {
+QStringList forceTexts(const SheetPhase& phase) {
   const Measurement& measurement = phase.measured->measurement;
   const QString zero = eachOnce(measurement.runs, [](const MeasuredRun& run) {
     return Sheet::tr("force zero %1").arg(zeroStateText(run.zeroState));
@@ -107,7 +109,7 @@ QString forceText(const SheetPhase& phase) {
     parts << Sheet::tr("judged: %1").arg(forceBasisName(phase.verdict->forceBasis));
   }
   parts << gasText(measurement.gas);
-  return parts.join(QStringLiteral("; "));
+  return parts;
 }
 
 QString rigText(const SheetPhase& phase) {
@@ -134,12 +136,28 @@ QString recordingsText(const Measurement& measurement) {
 
 std::vector<LabelledText> conditionWords(const SheetPhase& phase) {
   const Measurement& measurement = phase.measured->measurement;
-  return {{Sheet::tr("Motion"), motionText(measurement)},
-          {Sheet::tr("Averaging"),
-           cyclesText(measurement) + QStringLiteral("; ") + temperatureText(measurement)},
-          {Sheet::tr("Force"), forceText(phase)},
-          {Sheet::tr("Rig"), rigText(phase)},
-          {Sheet::tr("Recordings"), recordingsText(measurement)}};
+  std::vector<LabelledText> words;
+  const auto add = [&words](const QString& label, const QStringList& texts) {
+    for (const QString& text : texts) words.emplace_back(label, text);
+  };
+  add(Sheet::tr("Motion"), motionTexts(measurement));
+  add(Sheet::tr("Averaging"), {cyclesText(measurement), temperatureText(measurement)});
+  add(Sheet::tr("Force"), forceTexts(phase));
+  add(Sheet::tr("Rig"), {rigText(phase)});
+  add(Sheet::tr("Recordings"), {recordingsText(measurement)});
+  return words;
+}
+
+std::vector<LabelledText> joined(const std::vector<LabelledText>& words) {
+  std::vector<LabelledText> lines;
+  for (const auto& [label, text] : words) {
+    if (!lines.empty() && lines.back().first == label) {
+      lines.back().second += QStringLiteral("; ") + text;
+    } else {
+      lines.emplace_back(label, text);
+    }
+  }
+  return lines;
 }
 
 CommonConditions commonConditions(const SheetContent& content) {

@@ -9,8 +9,11 @@ namespace dampwright {
 
 /// Test conditions: speeds, stroke, waveform, temperature, cycles averaged and left out, force
 /// basis, zero state, gas, rig and its calibration, recordings with the start of their checksums.
-/// The phase must have been measured.
+/// One entry for each thing that two tests may or may not share. The phase must have been measured.
 std::vector<LabelledText> conditionWords(const SheetPhase& phase);
+
+/// Neighbours of one label on one line: "waveform sine; stroke 50 mm".
+std::vector<LabelledText> joined(const std::vector<LabelledText>& words);
 
 /// Conditions that every measured test of a sheet shares word for word; they are printed once.
 /// Empty where there is one test only.

@@ -1,26 +1,22 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
-#include <vector>
-
 #include "ui/sheet/condition_words.h"
 #include "ui/sheet/paper.h"
-#include "ui/sheet/sheet_content.h"
+#include "ui/sheet/test_blocks.h"
 
 namespace dampwright {
 
-/// How the tests are set on the page.
-struct Arrangement {
-  bool compact = false;    ///< checks beside the plots, not below them
-  double plotHeight = 60;  ///< mm
-};
+/// Where the checks of a test stand: in a table below its plots, or in a list beside them.
+enum class Checks { Below, Beside };
 
-/// A section for each test of a damper (as found, after work, each setting): who it is, stamp, both
-/// plots on one force axis, checks, reasons, remarks, conditions that are not
-/// common to all, visual check. A damper without
-/// tests has one short section that says so.
-std::vector<SheetSection> damperSections(const SheetItem& item,
-                                         const Arrangement& arrangement,
-                                         const CommonConditions& common,
-                                         double width);
+/// The section of one test of a damper (as found, after work, each setting) on the whole width: who
+/// it is, stamp, both plots on one force axis, `plotHeight` mm high, checks, reasons, remarks,
+/// conditions that are not common to all, visual check. A damper without tests has a short section
+/// that says so.
+SheetSection testSection(const SheetTest& test,
+                         Checks checks,
+                         double plotHeight,
+                         const CommonConditions& common,
+                         double width);
 
 }  // namespace dampwright

@@ -65,7 +65,7 @@ SheetSection openingSection(const SheetContent& content,
                      {},
                      false});
   append(section, labelledGrid(details(content), width, 2, 22, 8.5));
-  if (!common.empty()) append(section, labelledGrid(common, width, 1, 22, 7.5));
+  if (!common.empty()) append(section, labelledGrid(joined(common), width, 1, 22, 7.5));
   section.push_back(space(1));
   return section;
 }

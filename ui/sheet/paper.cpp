@@ -3,6 +3,7 @@
 
 #include <QLocale>
 #include <QPen>
+#include <algorithm>
 #include <iterator>
 #include <numeric>
 
@@ -87,6 +88,29 @@ SheetSection paragraph(const QString& text, double width, const TextStyle& style
     section[section.size() - 2].keepWithNext = true;
   }
   return section;
+}
+
+double halfOf(double width) {
+  constexpr double gap = 5;  // mm
+  return (width - gap) / 2;
+}
+
+SheetBlock beside(const SheetSection& left, const SheetSection& right) {
+  const auto paintStack = [](QPainter& painter, QRectF box, const SheetSection& stack) {
+    for (const SheetBlock& block : stack) {
+      box.setHeight(block.height);
+      painter.save();
+      if (block.paint) block.paint(painter, box);
+      painter.restore();
+      box.translate(0, block.height);
+    }
+  };
+  const auto paint = [=](QPainter& painter, const QRectF& box) {
+    const double half = halfOf(box.width());
+    paintStack(painter, {box.left(), box.top(), half, box.height()}, left);
+    paintStack(painter, {box.right() - half, box.top(), half, box.height()}, right);
+  };
+  return {std::max(heightOf(left), heightOf(right)), paint, false, {}, false};
 }
 
 void append(SheetSection& section, SheetSection more) {

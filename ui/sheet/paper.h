@@ -53,6 +53,9 @@ SheetBlock space(double height);
 SheetBlock hairline(double above, double below);
 /// Wrapped text; a block for every line, the first two and the last two never parted.
 SheetSection paragraph(const QString& text, double width, const TextStyle& style);
+/// Two stacks beside each other, each halfOf(width) wide. One block: never parted.
+SheetBlock beside(const SheetSection& left, const SheetSection& right);
+double halfOf(double width);
 void append(SheetSection& section, SheetSection more);
 
 }  // namespace dampwright

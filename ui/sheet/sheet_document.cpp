@@ -3,12 +3,15 @@
 
 #include <QCoreApplication>
 #include <algorithm>
+#include <optional>
+#include <utility>
 
 #include "ui/look/palette.h"
 #include "ui/sheet/closing_section.h"
 #include "ui/sheet/damper_section.h"
 #include "ui/sheet/opening_section.h"
 #include "ui/sheet/page_head.h"
+#include "ui/sheet/pair_section.h"
 
 namespace dampwright {
 
@@ -18,62 +21,109 @@ struct Sheet {
   Q_DECLARE_TR_FUNCTIONS(Sheet)
 };
 
+// How the tests are set on the page.
+enum class Setting { ChecksBelow, ChecksBeside, InPairs };
+
+struct Arrangement {
+  Setting setting;
+  double plotHeight;  // mm
+};
+
 // From the roomiest to the tightest.
-constexpr Arrangement arrangements[] = {{false, 78},
-                                        {false, 70},
-                                        {false, 63},
-                                        {false, 57},
-                                        {false, 52},
-                                        {false, 47},
-                                        {true, 66},
-                                        {true, 60},
-                                        {true, 54},
-                                        {true, 49},
-                                        {true, 45}};
+constexpr Arrangement arrangements[] = {
+    {Setting::ChecksBelow, 78},  {Setting::ChecksBelow, 70},  {Setting::ChecksBelow, 63},
+    {Setting::ChecksBelow, 57},  {Setting::ChecksBelow, 52},  {Setting::ChecksBelow, 47},
+    {Setting::ChecksBeside, 66}, {Setting::ChecksBeside, 60}, {Setting::ChecksBeside, 54},
+    {Setting::ChecksBeside, 49}, {Setting::ChecksBeside, 45}, {Setting::InPairs, 60},
+    {Setting::InPairs, 56},      {Setting::InPairs, 52},      {Setting::InPairs, 49},
+    {Setting::InPairs, 46},      {Setting::InPairs, 43},      {Setting::InPairs, 40},
+    {Setting::InPairs, 37},      {Setting::InPairs, 35}};
 
 // Pages that a sheet takes as a rule: one for one test, two for up to four, then two tests a page.
-std::size_t usualPages(const SheetContent& content) {
-  std::size_t tests = 0;
-  for (const SheetItem& item : content.items) tests += std::max<std::size_t>(1, item.phases.size());
+std::size_t usualPages(std::size_t tests) {
   return tests <= 1 ? 1 : std::max<std::size_t>(2, (tests + 1) / 2);
 }
 
 // A check list beside the plots can't be parted: it must stay well under a page.
-bool compactFits(const SheetContent& content) {
+bool besideFits(const std::vector<SheetTest>& tests) {
   constexpr std::size_t mostChecks = 16;
-  for (const SheetItem& item : content.items) {
-    for (const SheetPhase& phase : item.phases) {
-      if (phase.verdict && phase.verdict->checks.size() > mostChecks) return false;
-    }
-  }
-  return true;
+  return std::ranges::all_of(tests, [](const SheetTest& test) {
+    return test.phase == nullptr || !test.phase->verdict ||
+           test.phase->verdict->checks.size() <= mostChecks;
+  });
 }
 
-std::vector<SheetPage> laidOut(const SheetContent& content,
-                               const QRectF& body,
-                               const Arrangement& arrangement) {
-  const CommonConditions common = commonConditions(content);
-  std::vector<SheetSection> sections = {openingSection(content, common, body.width())};
-  for (const SheetItem& item : content.items) {
-    for (SheetSection& section : damperSections(item, arrangement, common, body.width())) {
-      sections.push_back(std::move(section));
+// What stands on the whole width of the page: one test, or a pair.
+struct Part {
+  SheetTest first;
+  std::optional<SheetTest> second;
+  double plotHeight;  // mm
+};
+
+std::vector<Part> partsOf(const std::vector<SheetTest>& tests, const Arrangement& arrangement) {
+  std::vector<Part> parts;
+  for (std::size_t i = 0; i < tests.size(); ++i) {
+    parts.push_back({tests[i], std::nullopt, arrangement.plotHeight});
+    if (arrangement.setting == Setting::InPairs && i + 1 < tests.size() &&
+        belongTogether(tests[i], tests[i + 1])) {
+      parts.back().second = tests[++i];
     }
   }
-  sections.push_back(closingSection(content, body.width()));
-  return paginate(sections, body);
+  return parts;
+}
+
+struct Layout {
+  const SheetContent& content;
+  QRectF body;
+  CommonConditions common;
+
+  std::vector<SheetPage> pages(const std::vector<Part>& parts, Checks checks) const {
+    const double width = body.width();
+    std::vector<SheetSection> sections = {openingSection(content, common, width)};
+    for (const auto& [first, second, height] : parts) {
+      sections.push_back(second ? pairSection(first, *second, height, common, width)
+                                : testSection(first, checks, height, common, width));
+    }
+    sections.push_back(closingSection(content, width));
+    return paginate(sections, body);
+  }
+};
+
+// The first page of a car has more room than the last: its plots may be higher.
+std::vector<SheetPage> grown(const Layout& layout,
+                             std::vector<Part> parts,
+                             Checks checks,
+                             std::vector<SheetPage> pages) {
+  constexpr double step = 2, highest = 60;  // mm
+  for (Part& part : parts) {
+    while (part.second && part.plotHeight + step <= highest) {
+      part.plotHeight += step;
+      std::vector<SheetPage> higher = layout.pages(parts, checks);
+      if (higher.size() > pages.size()) {
+        part.plotHeight -= step;
+        break;
+      }
+      pages = std::move(higher);
+    }
+  }
+  return pages;
 }
 
 }  // namespace
 
 SheetDocument::SheetDocument(SheetContent content, PaperSize paper)
     : content_(std::make_shared<const SheetContent>(std::move(content))), paper_(paper) {
-  const QRectF body = paperFormat(paper).body;
-  const std::size_t usual = usualPages(*content_);
-  const bool compact = compactFits(*content_);
+  const Layout layout{*content_, paperFormat(paper).body, commonConditions(*content_)};
+  const std::vector<SheetTest> tests = testsOf(*content_);
+  const std::size_t usual = usualPages(tests.size());
+  const bool besideToo = besideFits(tests);
   for (const Arrangement& arrangement : arrangements) {
-    if (arrangement.compact && !compact) continue;
-    std::vector<SheetPage> pages = laidOut(*content_, body, arrangement);
-    if (pages_.empty() || pages.size() < pages_.size()) pages_ = std::move(pages);
+    const Checks checks =
+        arrangement.setting == Setting::ChecksBelow || !besideToo ? Checks::Below : Checks::Beside;
+    const std::vector<Part> parts = partsOf(tests, arrangement);
+    std::vector<SheetPage> pages = layout.pages(parts, checks);
+    if (!pages_.empty() && pages.size() >= pages_.size()) continue;
+    pages_ = grown(layout, parts, checks, std::move(pages));
     if (pages_.size() <= usual) break;
   }
 }

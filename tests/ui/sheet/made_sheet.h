@@ -142,4 +142,29 @@ inline SheetContent sheet(const Job& job, const std::vector<VerdictWord>& words)
   return sheetContent(job, {}, result, bytesOf).value();
 }
 
+// Each damper on a rig of its own, at its own temperature, judged by the same nine checks; the
+// right ones make 31 N too much in one of them.
+inline SheetContent unlikeRigs(SheetContent content) {
+  int rig = 1;
+  for (SheetItem& item : content.items) {
+    SheetPhase& phase = item.phases[0];
+    const auto own = std::make_shared<Measured>(*phase.measured);
+    for (MeasuredBlock& measured : own->measurement.blocks) *measured.block.temperature += rig;
+    *own->measurement.gas.force += rig;
+    phase.measured = own;
+    phase.phase.runs[0].rig = "bench " + std::to_string(rig);
+    phase.verdict = nineChecks(VerdictWord::Pass);
+    phase.verdict->checks.push_back(
+        forceCheck(Direction::Rebound, 1.0, 2000, 2700, VerdictWord::Pass));
+    if (rig % 2 == 0) {
+      CheckVerdict& failed = phase.verdict->checks[4];
+      failed.measured = *failed.max + 31;
+      failed.margin = -31;
+      failed.verdict = phase.verdict->word = VerdictWord::Fail;
+    }
+    ++rig;
+  }
+  return content;
+}
+
 }  // namespace dampwright::made

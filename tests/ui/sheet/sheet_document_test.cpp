@@ -135,6 +135,62 @@ TEST_P(EachPaper, ACarTakesTwoPagesWithTheSameHead) {
   EXPECT_EQ(pdfText(path).count(QStringLiteral("End of sheet")), 1);
 }
 
+// Four dampers on four rigs, nine checks each, as a workshop has them on a busy day.
+TEST_P(EachPaper, ACarOnUnlikeRigsTakesTwoPagesAndSaysEverything) {
+  const SheetContent content = made::unlikeRigs(made::sheet(made::job(car), {Pass}));
+  const QString path = pdfOf(content);
+  EXPECT_EQ(pdfFact(path, QStringLiteral("Pages")), QStringLiteral("2"));
+  expectAll(pdfPageText(path, 1), {"Front left · DA-1107", "Front right · DA-1108", "bench 1"});
+  const QString rear = pdfPageText(path, 2);
+  expectAll(rear,
+            {"Rear left · DA-1109",
+             "Rear right · DA-1110",
+             "part number PN-4711-B",
+             "Compression at 300 mm/s",
+             "100 N ± 8 %",
+             "600.0 ± 9.0 N",
+             "150.3 ± 3.2 N",
+             "2.06",
+             "+68.0 N",
+             "−31.0 N",
+             "1 of 9 checks fails",
+             "bench 3",
+             "bench 4",
+             "calibrated 10 January 2031",
+             "DA-1109 as found.csv",
+             "DA-1110 as found.csv",
+             "no leak",
+             "Authorised by",
+             "Cautions"});
+  for (const SheetItem& item : content.items) {
+    const std::string hash = item.phases[0].measured->measurement.runs[0].source.file.sha256;
+    EXPECT_TRUE(pdfText(path).contains(QString::fromStdString(hash.substr(0, 12))));
+  }
+}
+
+TEST_P(EachPaper, ACoverageFactorOfAllChecksIsSaidOnce) {
+  SheetContent content = made::unlikeRigs(made::sheet(made::job(car), {Pass}));
+  for (SheetItem& item : content.items) {
+    for (CheckVerdict& check : item.phases[0].verdict->checks) check.coverageFactor = 2.13;
+  }
+  const QString rear = pdfPageText(pdfOf(content), 2);
+  EXPECT_EQ(rear.count(QStringLiteral("2.13")), 1);
+  EXPECT_EQ(rear.count(QStringLiteral("Pass")), 17);  // there is room for the words then
+  EXPECT_EQ(rear.count(QStringLiteral("Fail")), 1);
+}
+
+TEST_P(EachPaper, FiveSettingsOfOneDamperTakeThreePages) {
+  SheetContent content = made::sheet(made::job({"rear"}), {Pass});
+  content.items[0].phases[0].phase.setting = {{"rebound", 2}};
+  for (const double clicks : {6, 10, 14, 18}) {
+    content.items[0].phases.push_back(content.items[0].phases[0]);
+    content.items[0].phases.back().phase.setting = {{"rebound", clicks}};
+  }
+  const QString path = pdfOf(content);
+  EXPECT_EQ(pdfFact(path, QStringLiteral("Pages")), QStringLiteral("3"));
+  expectAll(pdfText(path), {"rebound 2", "rebound 6", "rebound 10", "rebound 14", "rebound 18"});
+}
+
 TEST_P(EachPaper, ManyChecksRunOverToPagesWithTheSameHead) {
   SheetContent content = made::sheet(made::job({"rear left"}), {Pass});
   auto& checks = content.items[0].phases[0].verdict->checks;
