@@ -101,7 +101,7 @@ void MainWindow::connectActions() {
     });
   };
   on(ActionId::NewJob, [this] { startNewJob({}); });
-  on(ActionId::StartPage, [this] { pages_->setCurrentWidget(startPage_); });
+  on(ActionId::StartPage, [this] { showStartPage(); });
   on(ActionId::Demonstration, [this] { session_.openDemonstration(); });
   on(ActionId::AddRuns, [this] { takeFiles(chooseRunFiles(this), {}); });
   onJobPage(ActionId::Limits, [this] { jobPage_->verdict()->openLimits(); });
@@ -154,7 +154,7 @@ void MainWindow::connectSession() {
   connect(&session_, &Session::recentJobsChanged, this, &MainWindow::refresh);
   connect(&session_, &Session::bookRead, this, [this] {
     refresh();
-    if (!session_.hasJob()) pages_->setCurrentWidget(startPage_);
+    if (!session_.hasJob()) showStartPage();
   });
   connect(&session_, &Session::bookTrouble, this, [this](const QString& sentence) {
     trouble_->setText(sentence);
@@ -183,6 +183,11 @@ void MainWindow::refresh() {
   const QString number = hasJob ? QString::fromStdString(session_.job().number) : QString();
   setWindowTitle(number.isEmpty() ? QStringLiteral("Dampwright")
                                   : tr("Job %1 – Dampwright").arg(number));
+}
+
+void MainWindow::showStartPage() {
+  pages_->setCurrentWidget(startPage_);
+  startPage_->takeFocus();
 }
 
 void MainWindow::showJobPage() {

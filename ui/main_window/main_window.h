@@ -45,6 +45,7 @@ class MainWindow : public QMainWindow {
   void connectSession();
   void on(ActionId id, const std::function<void()>& does);
   void refresh();
+  void showStartPage();
   void showJobPage();
   void startNewJob(const QStringList& filesToAdd);
   void takeFiles(const QStringList& files, const QString& corner);

@@ -41,7 +41,7 @@ JobDialog::JobDialog(Use use, const Job& job, QWidget* parent)
   auto* form = new QFormLayout(this);
   form->setContentsMargins(16, 16, 16, 16);
   form->setSpacing(12);
-  form->addRow(tr("&Kind"), kind_);
+  form->addRow(tr("&Kind of vehicle"), kind_);
   form->addRow(tr("&Customer"), customer_);
   form->addRow(tr("&Vehicle"), vehicle_);
   form->addRow(tr("&Plate"), plate_);

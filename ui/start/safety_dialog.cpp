@@ -30,7 +30,10 @@ SafetyDialog::SafetyDialog(QWidget* parent) : QDialog(parent) {
   understood->setObjectName(QStringLiteral("primary"));
   understood->setDefault(true);
   column->addWidget(understood, 0, Qt::AlignRight);
-  setMinimumWidth(580);
+  constexpr int wide = 580;
+  setMinimumWidth(wide);
+  resize(wide,
+         column->totalHeightForWidth(wide));  // wrapped lines would ask for more than they need
   connect(understood, &QPushButton::clicked, this, &QDialog::accept);
 }
 

@@ -119,6 +119,11 @@ void StartPage::setRecentJobs(const std::vector<JobSummary>& jobs) {
   if (any) recent_->setCurrentItem(recent_->topLevelItem(0));
 }
 
+void StartPage::takeFocus() {
+  QWidget* first = recent_->topLevelItemCount() > 0 ? static_cast<QWidget*>(recent_) : newJob_;
+  first->setFocus(Qt::OtherFocusReason);
+}
+
 void StartPage::openCurrent() {
   const QTreeWidgetItem* current = recent_->currentItem();
   if (current != nullptr) emit openWanted(current->data(Number, Qt::UserRole).toString());

@@ -17,6 +17,7 @@ class StartPage : public QWidget {
  public:
   explicit StartPage(QWidget* parent = nullptr);
 
+  void takeFocus();  ///< to the recent jobs, or to the new job while there are none
   void setRecentJobs(const std::vector<JobSummary>& jobs);
 
  signals:

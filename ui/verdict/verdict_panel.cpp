@@ -48,6 +48,8 @@ VerdictPanel::VerdictPanel(QWidget* parent)
       stamp_(new StampBanner),
       damper_(quiet(new ElidedLabel(Qt::ElideMiddle))),
       line_(new QLabel),
+      empty_(new QLabel(tr("Each check stands here: what is asked, what was measured with its "
+                           "uncertainty, and the margin."))),
       rule_(quiet(new QLabel)),
       checksHeading_(heading(tr("Checks"))),
       notesHeading_(heading(tr("Reasons and remarks"))),
@@ -59,6 +61,8 @@ VerdictPanel::VerdictPanel(QWidget* parent)
   setObjectName(QStringLiteral("card"));
   setFixedWidth(332);
   line_->setWordWrap(true);
+  empty_->setObjectName(QStringLiteral("quiet"));
+  empty_->setWordWrap(true);
   limits_->setAccessibleName(tr("Limits"));
   limits_->view()->installEventFilter(this);
   dismissAll_->setObjectName(QStringLiteral("link"));
@@ -94,6 +98,7 @@ void VerdictPanel::buildColumn() {
   column->addWidget(line_);
   column->addLayout(limitsRow);
   column->addLayout(checksRow);
+  column->addWidget(empty_);
   column->addWidget(checks_);
   column->addLayout(notesRow);
   column->addWidget(notices_, 1);
@@ -109,7 +114,7 @@ void VerdictPanel::setView(const VerdictView& view) {
   checks_->setVerdict(view.verdict);
   const bool judged = view.verdict && !view.verdict->checks.empty();
   checks_->setVisible(judged);
-  checksHeading_->setVisible(judged);
+  empty_->setVisible(!judged);
   showNotices();
   sheet_->setEnabled(view.printable);
   showRule();

@@ -50,7 +50,7 @@ class VerdictPanel : public QFrame {
   std::vector<Limits> offered_;  // the rows of the list, in its order
   StampBanner* stamp_;
   ElidedLabel* damper_;
-  QLabel *line_, *rule_, *checksHeading_, *notesHeading_;
+  QLabel *line_, *empty_, *rule_, *checksHeading_, *notesHeading_;
   ElidedComboBox* limits_;
   ChecksTable* checks_;
   NoticeList* notices_;

@@ -10,6 +10,7 @@
 #include "ui/main_window/work_status.h"
 #include "ui/plots/loop_plot.h"
 #include "ui/plots/loops_view.h"
+#include "ui/plots/run_plot.h"
 #include "ui/start/start_page.h"
 #include "ui/verdict/checks_table.h"
 #include "ui/verdict/verdict_panel.h"
@@ -30,6 +31,7 @@ class MainWindowTest : public WindowTest {
 
 TEST_F(MainWindowTest, WithoutAJobTheStartPageIsShown) {
   EXPECT_TRUE(window->startPage()->isVisible());
+  EXPECT_TRUE(window->startPage()->isAncestorOf(QApplication::focusWidget()));
   EXPECT_FALSE(window->actions()[ActionId::PrintSheet]->isEnabled());
   EXPECT_EQ(made::clippedTexts(window.get()), QStringList());
   shoot("start_first");
@@ -50,6 +52,8 @@ TEST_F(MainWindowTest, NothingIsClippedAtAnySizeInBothThemes) {
     window->resize(size);
     QTest::qWait(100);
     EXPECT_EQ(window->size(), size);  // nothing forces it larger
+    EXPECT_EQ(made::clippedTexts(window.get()), QStringList()) << size.width();
+    window->jobPage()->loops()->showInstant(Instant{2, 0.25, std::nullopt});
     EXPECT_EQ(made::clippedTexts(window.get()), QStringList()) << size.width();
   }
   window->actions()[ActionId::Dark]->trigger();
@@ -145,6 +149,45 @@ TEST_F(MainWindowTest, LongNamesAreElidedAndStandWholeInTheTooltip) {
   for (const QLabel* label : window->findChildren<QLabel*>())
     whole = whole || label->toolTip().contains(QString(300, 'x'));
   EXPECT_TRUE(whole);
+}
+
+// While a damper is measured again, somebody may be reading its checks.
+TEST_F(MainWindowTest, ProgressLeavesTheChecksAlone) {
+  openDemonstration();
+  auto* checks = window->jobPage()->verdict()->findChild<ChecksTable*>();
+  checks->selectRow(5);
+  QSignalSpy reset(checks->model(), &QAbstractItemModel::modelReset);
+  QSignalSpy changed(checks->model(), &QAbstractItemModel::dataChanged);
+  QSignalSpy stated(session.get(), &Session::stateChanged);
+  emit session->progressChanged(session->selected());
+  EXPECT_EQ(changed.count(), 0);
+  const RunCycle last = window->jobPage()->loops()->run()->figure().cycles.back();
+  session->strikeOut(session->selected(), static_cast<int>(last.run), last.span);
+  waitForWork();
+  EXPECT_GE(stated.count(), 2);
+  EXPECT_EQ(reset.count(), 0);
+  ASSERT_EQ(checks->selectionModel()->selectedRows().size(), 1);
+  EXPECT_EQ(checks->selectionModel()->selectedRows()[0].row(), 5);
+}
+
+TEST_F(MainWindowTest, SeveralWrongFilesStayUntilDismissed) {
+  openDemonstration();
+  for (const char* name : {"one.csv", "two.csv"}) {
+    QFile file(folder.filePath(name));
+    ASSERT_TRUE(file.open(QIODevice::WriteOnly));
+    file.close();
+    session->dropFiles({file.fileName()}, "front left");
+    waitForWork();
+  }
+  EXPECT_TRUE(everythingSaid().contains("one.csv"));
+  EXPECT_TRUE(everythingSaid().contains("two.csv"));
+  shoot("wrong_files");
+  EXPECT_EQ(made::clippedTexts(window.get()), QStringList());
+  for (QPushButton* button : window->findChildren<QPushButton*>()) {
+    if (button->text() == "Dismiss all") QTest::mouseClick(button, Qt::LeftButton);
+  }
+  EXPECT_FALSE(everythingSaid().contains("one.csv"));
+  EXPECT_FALSE(everythingSaid().contains("two.csv"));
 }
 
 TEST_F(MainWindowTest, WorkThatTakesLongerSaysSoAndIsStopped) {

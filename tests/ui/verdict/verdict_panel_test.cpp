@@ -195,6 +195,7 @@ TEST_F(VerdictPanelTest, WithoutARunItSaysWhatIsMissing) {
   view.verdict.reset();
   panel.setView(view);
   EXPECT_TRUE(everythingSaid().contains("No run yet"));
+  EXPECT_TRUE(everythingSaid().contains("Each check stands here"));
   EXPECT_FALSE(button(QString::fromUtf8("Print sheet…"))->isEnabled());
   view.broken = true;
   panel.setView(view);
