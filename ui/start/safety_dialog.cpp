@@ -32,8 +32,8 @@ SafetyDialog::SafetyDialog(QWidget* parent) : QDialog(parent) {
   column->addWidget(understood, 0, Qt::AlignRight);
   constexpr int wide = 580;
   setMinimumWidth(wide);
-  resize(wide,
-         column->totalHeightForWidth(wide));  // wrapped lines would ask for more than they need
+  // By itself the dialog would leave room for narrower lines.
+  resize(wide, column->totalHeightForWidth(wide));
   connect(understood, &QPushButton::clicked, this, &QDialog::accept);
 }
 
