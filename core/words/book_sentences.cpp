@@ -72,6 +72,11 @@ constexpr Sentence rows[] = {
     {"demonstration-missing",
      "The sample runs that the demonstration is made of are not there ({folder}).",
      "Install Dampwright again, or start a new job."},
+    {"runs-by-serial", "They tell the serial {serial}.", ""},
+    {"runs-by-corner", "They tell the place {corner}.", ""},
+    {"runs-by-setting", "They tell the setting {setting}.", ""},
+    {"runs-by-name", "Their names begin alike: {name}.", ""},
+    {"runs-by-speeds", "They were driven at different speeds, from {from} to {to}.", ""},
 };
 
 }  // namespace

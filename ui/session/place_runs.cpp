@@ -4,9 +4,10 @@
 #include <algorithm>
 #include <utility>
 
+#include "core/job/group_runs.h"
+#include "core/job/read_metadata.h"
+#include "core/job/suggest_corner.h"
 #include "ui/session/change_job.h"
-#include "ui/session/read_metadata.h"
-#include "ui/session/suggest_corner.h"
 
 namespace dampwright {
 
@@ -42,13 +43,14 @@ JobPhase phaseOf(const DroppedRun& run) {
   entry.file = run.bytes.name;
   entry.sha256 = run.bytes.sha256;
   entry.rig = run.rig;
-  return {Phase::AsFound, settingOf(metadataOf(run)), {std::move(entry)}};
+  return {Phase::AsFound, settingOfRun({run.bytes.name, metadataOf(run), {}}), {std::move(entry)}};
 }
 
 // By setting, then by name.
 std::pair<std::vector<double>, std::string> orderOf(const DroppedRun& run) {
   std::vector<double> values;
-  for (const SettingValue& one : settingOf(metadataOf(run))) values.push_back(one.value);
+  for (const SettingValue& one : settingOfRun({run.bytes.name, metadataOf(run), {}}))
+    values.push_back(one.value);
   return {values, run.bytes.name};
 }
 

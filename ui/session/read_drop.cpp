@@ -14,7 +14,7 @@
 #include "core/records/documents.h"
 #include "ui/session/find_profile.h"
 #include "ui/session/measure_phase.h"
-#include "ui/session/read_metadata.h"
+#include "core/job/read_metadata.h"
 
 namespace dampwright {
 

@@ -4,7 +4,7 @@
 #include <gmock/gmock.h>
 
 #include "ui/session/change_job.h"
-#include "ui/session/suggest_corner.h"
+#include "core/job/suggest_corner.h"
 
 namespace dampwright {
 namespace {

@@ -1,10 +1,10 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "ui/session/suggest_corner.h"
+#include "core/job/suggest_corner.h"
 
 #include <gtest/gtest.h>
 
 #include "core/job/job.h"
-#include "ui/session/words_of.h"
+#include "core/job/words_of.h"
 
 namespace dampwright {
 namespace {

@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "ui/session/words_of.h"
+#include "core/job/words_of.h"
 
 #include <utility>
 

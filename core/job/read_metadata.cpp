@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "ui/session/read_metadata.h"
+#include "core/job/read_metadata.h"
 
 #include <algorithm>
 #include <array>
@@ -7,7 +7,7 @@
 #include <optional>
 #include <string_view>
 
-#include "ui/session/words_of.h"
+#include "core/job/words_of.h"
 
 namespace dampwright {
 

@@ -1,10 +1,10 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "ui/session/suggest_corner.h"
+#include "core/job/suggest_corner.h"
 
 #include <algorithm>
 #include <array>
 
-#include "ui/session/words_of.h"
+#include "core/job/words_of.h"
 
 namespace dampwright {
 

@@ -4,7 +4,7 @@
 #include <vector>
 
 #include "core/job/job.h"
-#include "ui/session/suggest_corner.h"
+#include "core/job/suggest_corner.h"
 
 namespace dampwright {
 

@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "ui/session/read_metadata.h"
+#include "core/job/read_metadata.h"
 
 #include <gtest/gtest.h>
 
