@@ -5,6 +5,7 @@
 #include <charconv>
 #include <cmath>
 #include <string>
+#include <string_view>
 
 #include "core/base/units.h"
 #include "core/condition/raw_channels.h"
@@ -16,6 +17,7 @@ namespace dampwright {
 namespace {
 
 constexpr std::size_t fewestRows = 16;
+constexpr double narrowestRate = 2.52;  // times the cutoff; 4.2 times a class
 constexpr double mostSamples = 20e6;  // that gaps may blow a recording up to, with 4 times its rows
 
 // Carries the bits on to `before` samples earlier and `after` samples later.
@@ -83,11 +85,11 @@ Motion withoutInertia(Motion motion, double mass, LocalPolynomial fit) {
   return motion;
 }
 
-Motion filtered(Motion motion, const std::optional<CfcClass>& cfc) {
-  if (!cfc || motion.rate <= 4.2 * cfc->number) return motion;
-  motion.displacement = lowPass(*cfc, motion.rate, motion.displacement);
-  motion.force = lowPass(*cfc, motion.rate, motion.force);
-  const int reach = static_cast<int>(std::ceil(motion.rate / (cfc->number * 5 / 3) / 2));
+Motion filtered(Motion motion, const std::optional<LowPass>& filter) {
+  if (!filter || motion.rate <= narrowestRate * cutoffOf(*filter)) return motion;
+  motion.displacement = lowPass(*filter, motion.rate, motion.displacement);
+  motion.force = lowPass(*filter, motion.rate, motion.force);
+  const int reach = static_cast<int>(std::ceil(motion.rate / cutoffOf(*filter) / 2));
   motion.doubtful = widened(motion.doubtful, forceBits | PlaceMissing, reach, reach);
   return motion;
 }
@@ -152,19 +154,38 @@ Motion motionOf(RawChannels raw, const EvenClock& clock) {
   return motion;
 }
 
+// The number behind the words, and what stands behind the number.
+struct Named {
+  double number = 0;
+  std::string_view rest;
+};
+
+std::optional<Named> numberBehind(std::string_view name, std::string_view words) {
+  if (!name.starts_with(words)) return std::nullopt;
+  Named named;
+  const char* end = name.data() + name.size();
+  const auto read = std::from_chars(name.data() + words.size(), end, named.number);
+  if (read.ec != std::errc() || !(named.number > 0) || !std::isfinite(named.number))
+    return std::nullopt;
+  named.rest = {read.ptr, static_cast<std::size_t>(end - read.ptr)};
+  return named;
+}
+
+std::optional<LowPass> filterOf(std::string_view name) {
+  if (const auto butterworth = numberBehind(name, "Butterworth "))
+    return Butterworth{butterworth->number};
+  const auto cfc = numberBehind(name, "CFC ");
+  if (!cfc) return std::nullopt;
+  return CfcClass{cfc->number, cfc->rest == " ISO" ? CfcRule::Iso6487 : CfcRule::SaeJ211};
+}
+
 }  // namespace
 
 ConditionOptions conditionOptions(const RigProfile& rig) {
   ConditionOptions options;
   options.forceDelay = rig.forceDelay;
   options.movingMass = rig.movingMass;
-  if (!rig.lowPass || !rig.lowPass->starts_with("CFC ")) return options;
-  CfcClass cfc;
-  const char* end = rig.lowPass->data() + rig.lowPass->size();
-  const auto read = std::from_chars(rig.lowPass->data() + 4, end, cfc.number);
-  if (read.ec != std::errc() || !(cfc.number > 0)) return options;
-  if (std::string_view(read.ptr, end) == " ISO") cfc.rule = CfcRule::Iso6487;
-  options.lowPass = cfc;
+  if (rig.lowPass) options.lowPass = filterOf(*rig.lowPass);
   return options;
 }
 

@@ -12,13 +12,14 @@
 namespace dampwright {
 
 struct ConditionOptions {
-  double forceDelay = 0;            ///< s, force lags displacement by this much, |delay| < 0.1
-  double movingMass = 0;            ///< kg between cell and damper, >= 0
-  std::optional<CfcClass> lowPass;  ///< the same on displacement and force; nothing: no filter
-  double spikeThreshold = 8;        ///< [1] robust standard deviations that make a spike, >= 4
+  double forceDelay = 0;           ///< s, force lags displacement by this much, |delay| < 0.1
+  double movingMass = 0;           ///< kg between cell and damper, >= 0
+  std::optional<LowPass> lowPass;  ///< the same on displacement and force; nothing: no filter
+  double spikeThreshold = 8;       ///< [1] robust standard deviations that make a spike, >= 4
 };
 
-/// Delay, moving mass and filter of the profile. "CFC 60", "CFC 180 ISO" … name the filter; a name
+/// Delay, moving mass and filter of the profile. "CFC 60", "CFC 180 ISO", "Butterworth
+/// 200 Hz" (−3 dB after both passes) … name the filter; a name
 /// that is none of these filters nothing.
 ConditionOptions conditionOptions(const RigProfile& rig);
 
@@ -31,7 +32,7 @@ ConditionOptions conditionOptions(const RigProfile& rig);
 ///
 /// Remarks (those that the trace already carries are not repeated): uneven-clock, gap,
 /// missing-values, spikes-removed, clipped-force, velocity-disagrees.
-/// A class too high for the sample rate (over rate/4.2) filters nothing.
+/// A filter too high for the sample rate (a cutoff over rate/2.6) filters nothing.
 /// Errors: trace-too-short (values: rows, needed), gap-too-long (values: duration), stopped.
 Result<Motion> condition(const Trace& trace,
                          const ConditionOptions& options = {},

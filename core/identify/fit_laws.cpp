@@ -113,15 +113,19 @@ double meanVariance(std::span<const ScatteredPoint> points) {
 
 VectorXd standardErrors(const Law& law,
                         std::span<const ScatteredPoint> points,
-                        const FitSummary& found) {
+                        const FitSummary& found,
+                        double offsetU) {
   const VectorXd at = fromChart(law, found.parameters);
-  const auto covariance = unscaledCovariance(jacobian(law, points, at));
+  const MatrixXd byParameters = jacobian(law, points, at);
+  const auto covariance = unscaledCovariance(byParameters);
   if (!found.usable() || !covariance) return VectorXd::Constant(found.parameters.size(), nan);
   const double dof = static_cast<double>(points.size()) - static_cast<double>(covariance->rows());
   const double ofResiduals = dof > 0 ? found.rss / dof : 0;
   const double variance = std::max(ofResiduals, meanVariance(points));
   if (!(variance > 0) && !(dof > 0)) return VectorXd::Constant(found.parameters.size(), nan);
-  return (variance * covariance->diagonal()).cwiseSqrt();
+  // one newton more on all forces moves the parameters by (JᵀJ)⁻¹Jᵀ·1
+  const VectorXd byOffset = *covariance * byParameters.colwise().sum().transpose() * offsetU;
+  return (variance * covariance->diagonal() + byOffset.cwiseAbs2()).cwiseSqrt();
 }
 
 FittedLaw notFitted(const Law& law, std::string_view status) {
@@ -133,7 +137,7 @@ FittedLaw notFitted(const Law& law, std::string_view status) {
   return fitted;
 }
 
-FittedLaw fitLaw(const Law& law, std::span<const ScatteredPoint> points) {
+FittedLaw fitLaw(const Law& law, std::span<const ScatteredPoint> points, double offsetU) {
   std::vector<LawPoint> bare;
   double largest = 0;
   for (const ScatteredPoint& point : points) {
@@ -146,7 +150,7 @@ FittedLaw fitLaw(const Law& law, std::span<const ScatteredPoint> points) {
   FittedLaw fitted = notFitted(law, codeOf(best.summary.status));
   if (best.summary.status == FitStatus::AtBound && !best.atEdge) fitted.status = "converged";
   const VectorXd values = fromChart(law, best.summary.parameters);
-  const VectorXd errors = standardErrors(law, points, best.summary);
+  const VectorXd errors = standardErrors(law, points, best.summary, offsetU);
   for (std::size_t j = 0; j < law.parameters.size(); ++j) {
     const auto k = static_cast<Index>(j);
     fitted.parameters.push_back(
@@ -221,9 +225,9 @@ std::vector<CurvePoint> pointsOfOneStroke(const Curve& curve) {
 
 }  // namespace
 
-std::vector<FittedLaw> fitLaws(std::span<const ScatteredPoint> points) {
+std::vector<FittedLaw> fitLaws(std::span<const ScatteredPoint> points, double offsetU) {
   std::vector<FittedLaw> laws;
-  for (const Law* law : allLaws()) laws.push_back(fitLaw(*law, points));
+  for (const Law* law : allLaws()) laws.push_back(fitLaw(*law, points, offsetU));
   choose(laws, points);
   return laws;
 }
@@ -238,7 +242,7 @@ std::vector<FittedLaw> identifyLaws(const Curve& curve, const Gas& gas, const Fr
     points.push_back(
         {{reading.peakVelocity, *reading.dampingForce - *friction.dry}, reading.forceU});
   }
-  return fitLaws(points);
+  return fitLaws(points, std::hypot(gas.forceU, friction.dryU));
 }
 
 }  // namespace dampwright

@@ -27,8 +27,10 @@ struct ScatteredPoint {
 /// that an accidental fit through few points looks no better than its points. A knee on a tested
 /// speed, where the sum of squares has its least from both sides, is converged.
 /// @param points  by rising velocity
+/// @param offsetU  [N] standard uncertainty of what was taken off all forces alike (gas, dry
+///   friction); it goes into the standard errors of the parameters
 /// @return one entry for each law, the simplest first
-std::vector<FittedLaw> fitLaws(std::span<const ScatteredPoint> points);
+std::vector<FittedLaw> fitLaws(std::span<const ScatteredPoint> points, double offsetU = 0);
 
 /// The laws of one direction: its damping forces less dry friction, of the stroke that has most
 /// points. Nothing is fitted while gas or dry friction is not determined; the status says so.

@@ -168,9 +168,9 @@ FitSummary fitFullestModel(const Model& model) {
   return found;
 }
 
-/// What a bend of the valve's law at low speed would do to gas force and dry friction: their
-/// standard uncertainties from the distance to a fit that has one, less what noise alone puts
-/// between both fits.
+/// What a bend of the valve's law at low speed would do to gas force and dry friction: the distance
+/// to a fit that has one, less what noise alone puts between both fits; to the gas also its greater
+/// standard error there, because noise may hide the bend.
 struct FormDoubt {
   double gas = 0, dry = 0;
 };
@@ -194,7 +194,10 @@ FormDoubt formDoubt(const Model& model, const FitSummary& found, double widening
                          std::pow(widening * found.standardErrors[which], 2);
     return std::sqrt(std::max(0.0, distance * distance - std::max(0.0, noise)));
   };
-  return {doubt(Force), doubt(Dry)};
+  const double hidden = widening * rich.standardErrors[Force];
+  const double own = widening * found.standardErrors[Force];
+  return {std::hypot(doubt(Force), std::sqrt(std::max(0.0, hidden * hidden - own * own))),
+          doubt(Dry)};
 }
 
 /// Standard error of the dry friction, as if no bound held another parameter. Where the friction

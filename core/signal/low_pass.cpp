@@ -14,6 +14,12 @@ double designFrequency(const CfcClass& cfc) {
   return cfc.number * (cfc.rule == CfcRule::SaeJ211 ? 2.0775 : 25.0 / 12.0);
 }
 
+Biquad twoPoles(double wa) {
+  const double d = 1 + std::sqrt(2.0) * wa + wa * wa;
+  const double a0 = wa * wa / d;
+  return {a0, 2 * a0, a0, -2 * (wa * wa - 1) / d, (-1 + std::sqrt(2.0) * wa - wa * wa) / d};
+}
+
 // Filters in place from a state that would be at rest if the first sample had stood for ever.
 void filterSettled(const Biquad& f, std::vector<double>& signal) {
   double z1 = (1 - f.a0) * signal.front();
@@ -40,11 +46,18 @@ std::vector<double> padded(std::span<const double> signal, std::size_t padding) 
 
 }  // namespace
 
+double cutoffOf(const LowPass& filter) {
+  if (const auto* cfc = std::get_if<CfcClass>(&filter)) return cfc->number * 5.0 / 3.0;
+  return std::get<Butterworth>(filter).cutoff;
+}
+
 Biquad cfcBiquad(const CfcClass& cfc, double rate) {
-  const double wa = std::tan(pi * designFrequency(cfc) / rate);
-  const double d = 1 + std::sqrt(2.0) * wa + wa * wa;
-  const double a0 = wa * wa / d;
-  return {a0, 2 * a0, a0, -2 * (wa * wa - 1) / d, (-1 + std::sqrt(2.0) * wa - wa * wa) / d};
+  return twoPoles(std::tan(pi * designFrequency(cfc) / rate));
+}
+
+Biquad butterworthBiquad(const Butterworth& filter, double rate) {
+  // |H|² = 1/(1 + (tan(πf/rate)/wa)⁴) of one pass is 1/√2 at the cutoff
+  return twoPoles(std::tan(pi * filter.cutoff / rate) / std::pow(std::sqrt(2.0) - 1, 0.25));
 }
 
 std::vector<double> filterForward(const Biquad& f, std::span<const double> signal) {
@@ -72,11 +85,14 @@ std::vector<double> zeroPhase(const Biquad& filter,
   return {first, first + static_cast<std::ptrdiff_t>(signal.size())};
 }
 
-std::vector<double> lowPass(const CfcClass& cfc, double rate, std::span<const double> signal) {
+std::vector<double> lowPass(const LowPass& filter, double rate, std::span<const double> signal) {
   if (signal.size() < 2) return {signal.begin(), signal.end()};
-  const double period = rate / (cfc.number * 5.0 / 3.0);
+  const double period = rate / cutoffOf(filter);
   const auto wanted = static_cast<std::size_t>(std::ceil(3 * period)) + 9;
-  return zeroPhase(cfcBiquad(cfc, rate), signal, std::min(wanted, signal.size() - 1));
+  const auto* cfc = std::get_if<CfcClass>(&filter);
+  const Biquad biquad = cfc != nullptr ? cfcBiquad(*cfc, rate)
+                                       : butterworthBiquad(std::get<Butterworth>(filter), rate);
+  return zeroPhase(biquad, signal, std::min(wanted, signal.size() - 1));
 }
 
 }  // namespace dampwright

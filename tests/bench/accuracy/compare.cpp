@@ -4,6 +4,7 @@
 #include <cmath>
 #include <cstdio>
 
+#include "core/base/units.h"
 #include "core/curves/force_at.h"
 #include "core/measure/measure_runs.h"
 #include "core/uncertainty/student_t.h"
@@ -27,6 +28,13 @@ const CurvePoint* pointNear(const Curve& curve, double speed) {
 double forceBound(const MadeCase& made, const Block& block) {
   const double samples = 70.0 / 360 * block.loop.samples * block.loop.cycles;
   return made.forceNoise * std::sqrt(225.0 / 64 / samples);
+}
+
+/// Least standard error of the energy of the mean loop, [J]: white noise of the force alone through
+/// sum F dx, dx of a sine.
+double energyBound(const MadeCase& made, const Block& block) {
+  const double dx2 = std::pow(pi * block.stroke, 2) / (2 * block.loop.samples);
+  return made.forceNoise * std::sqrt(dx2 / block.loop.cycles);
 }
 
 struct Truth {
@@ -54,7 +62,8 @@ void compareBlocks(const Measurement& m, const Truth& truth, Tally& tally) {
                 {100 * (reading.peakVelocity / half.velocity - 1), straight ? 0.1 : 0.01});
       if (direction == Direction::Rebound) continue;
       const double energy = block.meanEnergy(), read = m.blocks[point->block].energy;
-      tally.add("energy [%]", {100 * (read / energy - 1), 0.03});
+      const double bound = 100 * energyBound(truth.made, m.blocks[point->block].block) / energy;
+      tally.add("energy [%]", {100 * (read / energy - 1), std::max(0.03, 2 * bound), bound});
     }
   }
 }
@@ -119,7 +128,10 @@ void compareLaw(const Measurement& m, const Truth& truth, Direction direction, T
       const FittedParameter& found = law.parameters[j];
       const double percent = 100 / parameters[j];
       tally.add("law known: " + form + " " + found.name + " [%]",
-                {percent * (found.value - parameters[j]), 0.5});
+                {percent * (found.value - parameters[j]),
+                 std::max(0.5, 2 * percent * found.u),
+                 percent * found.u,
+                 2 * percent * found.u});
     }
   }
 }

@@ -106,7 +106,7 @@ void drawPlans(MadeCase& made, Random& random) {
   made.plan = bench::speedsPlan(0.05, 0.005, 2, speeds, 10);
   made.between = bench::speedsPlan(0.05, 0.25, 5, {0.5, 0.7, 0.9}, 5);
   constexpr bench::Wave waves[] = {bench::Wave::Sine, bench::Wave::Crank, bench::Wave::Triangle};
-  const bench::Wave wave = made.standardBench ? bench::Wave::Sine : waves[oneOf(random, 3)];
+  const bench::Wave wave = waves[oneOf(random, made.standardBench ? 2 : 3)];
   for (bench::DrivePlan* plan : {&made.plan, &made.between}) {
     for (auto& step : plan->steps) {
       auto* block = std::get_if<bench::BlockPlan>(&step);

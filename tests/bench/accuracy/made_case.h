@@ -13,7 +13,7 @@ namespace dampwright::accuracy {
 /// One random damper on one random bench, with everything that is true about it.
 struct MadeCase {
   bool knownForms = true;     ///< valve laws and friction are forms that core/laws has
-  bool standardBench = true;  ///< 2 kHz, 2 N and 0.01 mm rms, sine
+  bool standardBench = true;  ///< 2 kHz, 2 N and 0.01 mm rms, sine or crank
   bench::Damper damper;
   bench::Law compression, rebound;                     ///< the valves
   std::string compressionForm, reboundForm;            ///< name in core/laws; empty where unknown

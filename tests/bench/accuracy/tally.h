@@ -14,6 +14,9 @@ struct Error {
   double interval = -1;  ///< half width of the stated 95 % interval; below 0: none is stated
 };
 
+/// What the last column judges: the targets of accuracy are stated for one bench, coverage for all.
+enum class Judged { Everything, CoverageOnly };
+
 /// Quantities by name, each with its errors.
 class Tally {
  public:
@@ -22,7 +25,7 @@ class Tally {
   void merge(const Tally& other);
   /// Bias, spread, the 95th percentile over the target's limit, spread over the bound, coverage,
   /// and ok or miss for each quantity, as lines of a table.
-  void print() const;
+  void print(Judged judged) const;
 
  private:
   std::map<std::string, std::vector<Error>> errors_;

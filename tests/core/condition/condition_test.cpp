@@ -97,11 +97,13 @@ TEST(Condition, InertiaOfTheMovingMassIsTakenOff) {
 
 TEST(Condition, TheLowPassMakesNoPhaseBetweenDisplacementAndForce) {
   const Trace trace = traceOf(test::makeRun(plan(1)));
-  ConditionOptions options;
-  options.lowPass = CfcClass{60};
-  const Motion motion = conditioned(trace, options);
-  for (std::size_t i = 300; i + 300 < motion.size(); ++i)
-    EXPECT_NEAR(motion.force[i], 1000 * motion.velocity[i], 0.1);  // 1e-4 of the peak
+  for (const LowPass& filter : {LowPass(CfcClass{60}), LowPass(Butterworth{80})}) {
+    ConditionOptions options;
+    options.lowPass = filter;
+    const Motion motion = conditioned(trace, options);
+    for (std::size_t i = 300; i + 300 < motion.size(); ++i)
+      EXPECT_NEAR(motion.force[i], 1000 * motion.velocity[i], 0.1);  // 1e-4 of the peak
+  }
 }
 
 TEST(Condition, SpikesAreTakenOutAndCounted) {
@@ -225,6 +227,14 @@ TEST(Condition, TemperatureIsCarriedAlong) {
   EXPECT_EQ(motion.temperature[7], 31.5);
 }
 
+TEST(Condition, StopsWhenAsked) {
+  std::stop_source stop;
+  stop.request_stop();
+  const auto motion = condition(traceOf(test::makeRun(plan(1))), {}, {stop.get_token(), {}});
+  ASSERT_FALSE(motion);
+  EXPECT_EQ(motion.error().code, "stopped");
+}
+
 TEST(Condition, TooFewRowsAreAnError) {
   Trace trace = traceOf(test::makeRun(plan()));
   for (auto* channel : {&trace.time, &trace.displacement, &trace.force}) channel->resize(15);
@@ -260,10 +270,14 @@ TEST(ConditionOptions, ComeFromTheRigProfile) {
   EXPECT_EQ(options.forceDelay, 0.001);
   EXPECT_EQ(options.movingMass, 1.5);
   ASSERT_TRUE(options.lowPass);
-  EXPECT_EQ(options.lowPass->number, 180);
-  EXPECT_EQ(options.lowPass->rule, CfcRule::Iso6487);
+  EXPECT_EQ(std::get<CfcClass>(*options.lowPass).number, 180);
+  EXPECT_EQ(std::get<CfcClass>(*options.lowPass).rule, CfcRule::Iso6487);
   rig.lowPass = "CFC 60";
-  EXPECT_EQ(conditionOptions(rig).lowPass->rule, CfcRule::SaeJ211);
+  EXPECT_EQ(std::get<CfcClass>(*conditionOptions(rig).lowPass).rule, CfcRule::SaeJ211);
+  rig.lowPass = "Butterworth 200 Hz";
+  EXPECT_EQ(std::get<Butterworth>(*conditionOptions(rig).lowPass).cutoff, 200);
+  rig.lowPass = "Butterworth -1 Hz";
+  EXPECT_FALSE(conditionOptions(rig).lowPass);
   rig.lowPass = "soft";
   EXPECT_FALSE(conditionOptions(rig).lowPass);
 }

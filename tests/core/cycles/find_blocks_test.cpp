@@ -261,6 +261,15 @@ TEST(FindBlocks, LessThanACycleIsAnErrorThatSaysWhatWasFound) {
   EXPECT_FALSE(findBlocks(still));
 }
 
+TEST(FindBlocks, StopsWhenAsked) {
+  std::stop_source stop;
+  stop.request_stop();
+  const Motion motion = motionOf(test::makeRun(planOf({waveAt(0.25, 8)})));
+  const auto blocks = findBlocks(motion, {}, {stop.get_token(), {}});
+  ASSERT_FALSE(blocks);
+  EXPECT_EQ(blocks.error().code, "stopped");
+}
+
 TEST(FindBlocks, DoubtfulSamplesEnterNoLoop) {
   MadePlan plan = planOf({waveAt(0.25, 9)});
   Motion motion = motionOf(test::makeRun(plan));

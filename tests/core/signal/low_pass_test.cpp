@@ -143,9 +143,32 @@ TEST(LowPass, TwoPassGainsAreThePublishedOnesAndSciPys) {
   EXPECT_NEAR(expected[4], 0.110057, 1e-6);
 }
 
+TEST(LowPass, AButterworthIsDownTo3DbAtItsCutoffAsSciPys) {
+  for (const double rate : {600.0, 2000.0, 10000.0}) {
+    const Butterworth filter{200};
+    const auto expected = pythonNumbers(
+        "import numpy as np\nfrom scipy.signal import butter, freqz\n"
+        "w = np.arctan(np.tan(np.pi*200/" +
+        std::to_string(rate) +
+        ")/(2**0.5-1)**0.25)*2/np.pi\n"
+        "b, a = butter(2, w)\nprint(*b, *a, abs(freqz(b, a, worN=[200], fs=" +
+        std::to_string(rate) + ")[1][0])**2)");
+    ASSERT_EQ(expected.size(), 7u);
+    const Biquad biquad = butterworthBiquad(filter, rate);
+    EXPECT_NEAR(biquad.a0, expected[0], tabulated);
+    EXPECT_NEAR(biquad.b1, -expected[4], tabulated);
+    EXPECT_NEAR(biquad.b2, -expected[5], tabulated);
+    EXPECT_NEAR(expected[6], std::sqrt(0.5), 1e-6);
+    EXPECT_NEAR(twoPassGain(biquad, rate, 200), std::sqrt(0.5), 1e-9);
+    EXPECT_EQ(cutoffOf(filter), 200);
+    const auto constant = lowPass(filter, rate, std::vector<double>(300, 1234.5));
+    for (const double value : constant) EXPECT_NEAR(value, 1234.5, 1234.5 * 1e-12);
+  }
+}
+
 TEST(LowPass, AConstantStaysConstant) {
   for (const double rate : {600.0, 2000.0, 10000.0}) {
-    const auto out = lowPass({60}, rate, std::vector<double>(500, 1234.5));
+    const auto out = lowPass(CfcClass{60}, rate, std::vector<double>(500, 1234.5));
     for (const double value : out) EXPECT_NEAR(value, 1234.5, 1234.5 * 1e-12);
   }
 }
@@ -166,17 +189,17 @@ TEST(LowPass, BothPassesAreSciPysSosfiltfilt) {
 
 TEST(LowPass, ReversedInTimeGivesReversedOut) {
   std::vector<double> signal = noise(3000);
-  const auto forward = lowPass({60}, 2000, signal);
+  const auto forward = lowPass(CfcClass{60}, 2000, signal);
   std::reverse(signal.begin(), signal.end());
-  auto backward = lowPass({60}, 2000, signal);
+  auto backward = lowPass(CfcClass{60}, 2000, signal);
   std::reverse(backward.begin(), backward.end());
   // away from the ends, where the order of the passes still shows
   for (std::size_t i = 500; i < 2500; ++i) EXPECT_NEAR(forward[i], backward[i], 1e-9);
 }
 
 TEST(LowPass, OneSampleOrNoneComesBackAsItIs) {
-  EXPECT_TRUE(lowPass({60}, 2000, std::vector<double>{}).empty());
-  EXPECT_EQ(lowPass({60}, 2000, std::vector<double>{5}).front(), 5);
+  EXPECT_TRUE(lowPass(CfcClass{60}, 2000, std::vector<double>{}).empty());
+  EXPECT_EQ(lowPass(CfcClass{60}, 2000, std::vector<double>{5}).front(), 5);
 }
 
 }  // namespace
