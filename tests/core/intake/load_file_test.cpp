@@ -5,7 +5,9 @@
 #include <sys/stat.h>
 #include <unistd.h>
 
+#include <atomic>
 #include <fstream>
+#include <thread>
 
 namespace dampwright {
 namespace {
@@ -34,7 +36,8 @@ class LoadFile : public testing::Test {
 };
 
 TEST_F(LoadFile, GivesTheBytesAsTheyAre) {
-  const std::string bytes = std::string("a\r\n\0b", 5) + std::string(5'000'000, 'x');
+  std::string bytes("a\r\n\0b", 5);
+  bytes.append(5'000'000, 'x');
   const auto loaded = loadFile(write("run.csv", bytes));
   ASSERT_TRUE(loaded);
   EXPECT_EQ(loaded.value(), bytes);
@@ -46,6 +49,25 @@ TEST_F(LoadFile, ReadsWhatIsLongerThanItsSizeSays) {
   const auto loaded = loadFile("/proc/self/status");
   ASSERT_TRUE(loaded);
   EXPECT_GT(loaded.value().size(), 100u);
+}
+
+TEST_F(LoadFile, AFileThatShrinksAndGrowsMeanwhileGivesWhatWasThere) {
+  const fs::path path = write("growing.csv", std::string(400'000, '7'));
+  std::atomic<bool> stop = false;
+  std::thread writer([&] {
+    for (int i = 0; !stop; ++i) {
+      fs::resize_file(path, i % 2 == 0 ? 1000 : 0);
+      std::ofstream(path, std::ios::binary | std::ios::app) << std::string(400'000, '7');
+    }
+  });
+  for (int i = 0; i < 200; ++i) {
+    const auto loaded = loadFile(path);
+    ASSERT_TRUE(loaded) << loaded.error().code;
+    EXPECT_EQ(loaded.value().find_first_not_of('7'), std::string::npos);
+    EXPECT_LE(loaded.value().size(), 401'000u);
+  }
+  stop = true;
+  writer.join();
 }
 
 TEST_F(LoadFile, SaysWhatIsWrongAndWhere) {
