@@ -38,8 +38,14 @@ TEST(Handbook, ListsEveryMessageOfTheProgram) {
 }
 
 TEST(Handbook, EveryLinkOfItsPagesLeadsSomewhere) {
-  for (const char* page :
-       {"index", "safety", "first_job", "run_files", "measured", "verdict", "documents"}) {
+  for (const char* page : {"index",
+                           "safety",
+                           "first_job",
+                           "run_files",
+                           "measured",
+                           "verdict",
+                           "documents",
+                           "accuracy"}) {
     const std::string text = textOf("resources/handbook/" + std::string(page) + ".md");
     EXPECT_FALSE(text.empty()) << page;
     for (const std::string& link : found(text, std::regex("\\]\\(([a-z_]+\\.[a-z]+)\\)"))) {
