@@ -54,7 +54,7 @@ VectorXd fromChart(const Law& law, const VectorXd& q) {
 }
 
 MatrixXd chartJacobian(const Law& law, std::span<const ScatteredPoint> points, const VectorXd& q) {
-  const MatrixXd byParameters = jacobian(law, points, fromChart(law, q));
+  MatrixXd byParameters = jacobian(law, points, fromChart(law, q));
   if (law.chart == nullptr) return byParameters;
   MatrixXd derivatives(q.size(), q.size());
   const auto rows = law.chart->derivatives(spanOf(q));
