@@ -65,7 +65,9 @@ Result<Job> jobOf(const BatchRequest& request,
   }
   JobPhase phase;
   for (const MeasuredRun& run : measurement.runs) {
-    phase.runs.push_back({run.source.file.name, run.source.file.sha256, {}, run.zeroState, {}});
+    JobRun entry{run.source.file.name, run.source.file.sha256, {}, {}, {}};
+    if (run.zeroState != ZeroState::Unknown) entry.answers.zeroState = run.zeroState;
+    phase.runs.push_back(std::move(entry));
   }
   item.phases.push_back(phase);
   job.items.push_back(item);

@@ -70,6 +70,11 @@ class Book {
   /// The newest revision of each title, by title.
   Result<std::vector<Limits>> limitSheets() const;
 
+  /// A file of the rig folder that was taken or turned down.
+  Result<Done> noteOffered(std::string_view sha256, std::string_view name);
+  /// Whether it was, or its bytes are in the book: it need not be offered again.
+  Result<bool> wasOffered(std::string_view sha256) const;
+
   Result<Done> setSetting(std::string_view name, std::string_view value);
   Result<std::string> setting(std::string_view name) const;  ///< empty where it was never set
 

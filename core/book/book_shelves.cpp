@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-// Rig profiles and limit sheets.
+// Rig profiles, limit sheets, and files of the rig folder.
 #include <QDateTime>
 #include <utility>
 
@@ -79,6 +79,24 @@ Result<std::vector<Limits>> Book::limitSheets() const {
     sheets.push_back(std::move(limits).value());
   }
   return sheets;
+}
+
+Result<Done> Book::noteOffered(std::string_view sha256, std::string_view name) {
+  const QString now = QDateTime::currentDateTimeUtc().toString(Qt::ISODateWithMs);
+  Result<QSqlQuery> noted = connection_.run(
+      "INSERT INTO offered_files (sha256, name, offered) VALUES (?, ?, ?) "
+      "ON CONFLICT (sha256) DO NOTHING",
+      {text(sha256), text(name), now});
+  if (!noted) return noted.error();
+  return Done{};
+}
+
+Result<bool> Book::wasOffered(std::string_view sha256) const {
+  Result<QSqlQuery> row =
+      connection_.run("SELECT 1 FROM offered_files WHERE sha256 = ?", {text(sha256)});
+  if (!row) return row.error();
+  if (row.value().next()) return true;
+  return hasRun(connection_, sha256);
 }
 
 }  // namespace dampwright

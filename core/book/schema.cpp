@@ -75,8 +75,15 @@ const QStringList version1 = {
             document TEXT NOT NULL))",
     "CREATE INDEX journal_by_subject ON journal (subject, key)"};
 
+// Files of a watched rig folder that somebody has taken or turned down.
+const QStringList version2 = {
+    R"(CREATE TABLE offered_files (
+            sha256 TEXT PRIMARY KEY,
+            name TEXT NOT NULL,
+            offered TEXT NOT NULL))"};
+
 const std::vector<QStringList>& migrations() {
-  static const std::vector<QStringList> list = {version1};
+  static const std::vector<QStringList> list = {version1, version2};
   return list;
 }
 

@@ -146,8 +146,10 @@ Result<RunReading> readBytes(std::string_view bytes,
   if (rig && settlesForm(*rig)) {
     form = textFormOf(options, rig);
     if (!form) return form.error();
+    const std::string signature = layout.value().signature;
     layout = findLayout(bytes, form.value());
     if (!layout) return layout.error();
+    layout.value().signature = signature;  // the one by which the profile is found again
   }
   return readLaidOut(std::move(layout).value(), form.value(), options, rig, progress);
 }

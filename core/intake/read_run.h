@@ -9,23 +9,11 @@
 
 #include "core/base/progress.h"
 #include "core/base/result.h"
+#include "core/rig/read_options.h"
 #include "core/rig/rig_profile.h"
 #include "core/trace/trace.h"
 
 namespace dampwright {
-
-/// Answers that the technician or the command line gives; each settles one open point and beats all
-/// evidence.
-struct ReadOptions {
-  std::optional<std::string> encoding, delimiter, decimal;
-  std::optional<std::int64_t> headerRow;  ///< line from 1
-  std::optional<std::string> time, displacement, force, velocity,
-      temperature;  ///< column name or number from 1
-  std::optional<std::string> timeUnit, displacementUnit, forceUnit, velocityUnit, temperatureUnit;
-  std::optional<double> sampleRate;  ///< Hz
-  std::optional<Direction> displacementPositive, forcePositive;
-  std::optional<ZeroState> zeroState;
-};
 
 /// A question that the file does not answer by itself.
 struct OpenPoint {

@@ -6,7 +6,7 @@
 
 #include "core/measure/measurement.h"
 #include "core/rig/damper_card.h"
-#include "core/rig/rig_profile.h"
+#include "core/rig/read_options.h"
 #include "core/verdict/limits.h"
 
 namespace dampwright {
@@ -18,8 +18,8 @@ enum class Phase { AsFound, AfterWork };
 struct JobRun {
   std::string file;  ///< name as dropped
   std::string sha256;
-  std::string rig;  ///< name of the rig profile it was read by, may be empty
-  ZeroState zeroState = ZeroState::Unknown;
+  std::string rig;      ///< name of the rig profile it is read by; empty: the one of its signature
+  ReadOptions answers;  ///< what the technician said of this file alone
   std::vector<TimeSpan> struckOut;
 
   bool operator==(const JobRun&) const = default;

@@ -8,11 +8,48 @@ namespace {
 
 constexpr DocumentKind jobDocument{"job", 1};
 
+void describe(Fields& io, ReadOptions& answers) {
+  io.text("encoding", answers.encoding);
+  io.text("delimiter", answers.delimiter);
+  io.text("decimal", answers.decimal);
+  io.count("header_row", answers.headerRow);
+  io.object("columns", [&](Fields& columns) {
+    columns.text("time", answers.time);
+    columns.text("displacement", answers.displacement);
+    columns.text("force", answers.force);
+    columns.text("velocity", answers.velocity);
+    columns.text("temperature", answers.temperature);
+  });
+  io.object("units", [&](Fields& units) {
+    units.text("time", answers.timeUnit);
+    units.text("displacement", answers.displacementUnit);
+    units.text("force", answers.forceUnit);
+    units.text("velocity", answers.velocityUnit);
+    units.text("temperature", answers.temperatureUnit);
+  });
+  io.number("sample_rate_hz", answers.sampleRate, positive);
+  io.word("displacement_positive", answers.displacementPositive, words::directions);
+  io.word("force_positive", answers.forcePositive, words::directions);
+}
+
+// The zero state stands with the run, all other answers in an object of their own.
+void describeAnswers(Fields& io, ReadOptions& answers) {
+  std::optional<ZeroState> zeroed = answers.zeroState;
+  io.word("zero_state", zeroed, words::zeroStates);
+  if (zeroed == ZeroState::Unknown) zeroed.reset();
+  std::optional<ReadOptions> others = answers;
+  others->zeroState.reset();
+  if (others == ReadOptions{}) others.reset();
+  io.object("reading", others, [](Fields& inside, ReadOptions& one) { describe(inside, one); });
+  answers = others.value_or(ReadOptions{});
+  answers.zeroState = zeroed;
+}
+
 void describe(Fields& io, JobRun& run) {
   io.text("file", run.file);
   io.text("sha256", run.sha256);
   io.text("rig", run.rig);
-  io.word("zero_state", run.zeroState, words::zeroStates);
+  describeAnswers(io, run.answers);
   describeSpans(io, "struck_out_s", run.struckOut);
 }
 

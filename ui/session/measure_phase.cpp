@@ -32,11 +32,10 @@ Result<RunRead> readingOf(const PhaseTask& task, std::size_t index, const Progre
     bytes = std::make_shared<const std::string>(std::move(kept).value());
   }
   const FindProfile find = [&](std::string_view signature) {
-    return findProfile(task.profiles, signature);
+    return findProfile(task.profiles, run.rig, signature);
   };
-  Result<RunReading> reading = readRun(*bytes, run.file, readOptionsOf(run), find, progress);
+  Result<RunReading> reading = readRun(*bytes, run.file, run.answers, find, progress);
   if (!reading) return reading.error();
-  if (!reading.value().trace) return openPointsError(reading.value(), run.file);
   return RunRead(std::make_shared<const RunReading>(std::move(reading).value()));
 }
 
@@ -48,19 +47,14 @@ Progress partOf(const Progress& whole, double from, double to) {
 
 MeasureOptions measureOptionsOf(const PhaseTask& task, const RunRead& first) {
   MeasureOptions options;
-  options.rig = findProfile(task.profiles, first->source.signature).value_or(RigProfile{});
+  options.rig = findProfile(task.profiles, task.runs.front().rig, first->source.signature)
+                    .value_or(RigProfile{});
   options.card = task.card;
   for (const JobRun& run : task.runs) options.struckOut.push_back(run.struckOut);
   return options;
 }
 
 }  // namespace
-
-ReadOptions readOptionsOf(const JobRun& run) {
-  ReadOptions options;
-  if (run.zeroState != ZeroState::Unknown) options.zeroState = run.zeroState;
-  return options;
-}
 
 Error openPointsError(const RunReading& reading, std::string_view file) {
   std::string points, options;
@@ -79,13 +73,18 @@ PhaseOutcome measurePhase(const PhaseTask& task, const Progress& progress) {
     const double from = readingShare * static_cast<double>(i) / count;
     const Progress part = partOf(progress, from, from + readingShare / count);
     Result<RunRead> reading = readingOf(task, i, part);
+    outcome.readings.push_back(reading ? reading.value() : nullptr);
+    std::optional<Error> problem;
     if (!reading) {
-      outcome.problem = reading.error();
-      return outcome;
+      problem = reading.error();
+    } else if (!reading.value()->trace) {
+      problem = openPointsError(*reading.value(), task.runs[i].file);
+    } else {
+      traces.push_back(*reading.value()->trace);
     }
-    outcome.readings.push_back(reading.value());
-    traces.push_back(*reading.value()->trace);
+    if (problem && !outcome.problem) outcome.problem = std::move(problem);
   }
+  if (outcome.problem) return outcome;
   Result<Measured> measured = measureRuns(
       traces, measureOptionsOf(task, outcome.readings.front()), partOf(progress, readingShare, 1));
   if (!measured) {

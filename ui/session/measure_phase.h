@@ -20,6 +20,8 @@ namespace dampwright {
 struct RunInHand {
   std::shared_ptr<const std::string> bytes;
   std::shared_ptr<const RunReading> reading;
+  ReadOptions answers;  ///< by which `reading` was made
+  std::string rig;      ///< by whose profile
 };
 
 /// Everything that a measurement depends on, as a snapshot.
@@ -34,7 +36,7 @@ struct PhaseTask {
 
 struct PhaseOutcome {
   std::vector<std::shared_ptr<const RunReading>>
-      readings;  ///< of every run, where there is no problem
+      readings;  ///< of every run, as far as it could be read
   std::shared_ptr<const Measured> measured;
   std::optional<Verdict> verdict;  ///< where there were limits
   std::optional<Error> problem;
@@ -46,8 +48,5 @@ PhaseOutcome measurePhase(const PhaseTask& task, const Progress& progress);
 
 /// What a reading without a recording still asks.
 Error openPointsError(const RunReading& reading, std::string_view file);
-
-/// How a run of the job is to be read.
-ReadOptions readOptionsOf(const JobRun& run);
 
 }  // namespace dampwright

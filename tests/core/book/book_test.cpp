@@ -53,6 +53,18 @@ TEST_F(Books, ANewJobGetsTheNextFreeNumberOfItsYear) {
   EXPECT_EQ(book.addJob(job, "new job").value(), "2032-0001");
 }
 
+TEST_F(Books, AFileIsKnownOnceItWasOfferedOrKept) {
+  const std::string bytes = bytesOf(1);
+  const RunBytes run = runOf(bytes);
+  EXPECT_FALSE(open().wasOffered(run.sha256).value());
+  ASSERT_TRUE(open().saveJob(jobWithRun("2031-0001", "", bytes), "new job", std::span(&run, 1)));
+  EXPECT_TRUE(open().wasOffered(run.sha256).value());
+  EXPECT_FALSE(open().wasOffered("ab").value());
+  ASSERT_TRUE(open().noteOffered("ab", "run.csv"));
+  ASSERT_TRUE(open().noteOffered("ab", "copy.csv")) << "twice is no error";
+  EXPECT_TRUE(open().wasOffered("ab").value());
+}
+
 TEST_F(Books, TheJournalKeepsEveryStateInOrder) {
   Book book = open();
   Job job = madeJob("2031-0001");

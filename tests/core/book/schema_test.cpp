@@ -36,6 +36,22 @@ TEST_F(Schema, AnEmptyFileBecomesABookOfTheNewestVersion) {
   ASSERT_TRUE(migrate(connection)) << "once more changes nothing";
 }
 
+TEST_F(Schema, ABookOfTheFirstVersionIsBroughtUpToDateWithAllThatItHolds) {
+  {
+    Book book = Book::open(file()).value();
+    ASSERT_TRUE(book.setSetting("last job", "2031-0001"));
+    // What version 2 has added is taken away again.
+    const Connection connection = Connection::open(file()).value();
+    ASSERT_TRUE(connection.run("DROP TABLE offered_files"));
+    ASSERT_TRUE(connection.run("DELETE FROM schema_versions WHERE version > 1"));
+    ASSERT_EQ(schemaOf(connection).value(), 1);
+  }
+  Book book = Book::open(file()).value();
+  EXPECT_EQ(book.setting("last job").value(), "2031-0001");
+  EXPECT_FALSE(book.wasOffered("ab").value());
+  EXPECT_EQ(schemaOf(Connection::open(file()).value()).value(), newestSchema());
+}
+
 TEST_F(Schema, EveryConnectionKeepsForeignKeysAndSyncsEveryCommit) {
   const Connection connection = Connection::open(file()).value();
   for (const auto& [pragma, value] : {std::pair("foreign_keys", 1), std::pair("synchronous", 2)}) {

@@ -321,6 +321,23 @@ TEST(ReadRun, AProfileSettlesTheDecimalMark) {
   EXPECT_TRUE(reading.value().trace.has_value());
 }
 
+// A profile of another text form cuts the file anew, and must still be found the next time.
+TEST(ReadRun, TheSignatureIsTheOneByWhichTheProfileWasFound) {
+  const std::string text = madeRun({.head = "Time (s);Travel (mm);Load (N)\n", .between = ";"});
+  const std::string plain = readMade(text).value().source.signature;
+  RigProfile rig;
+  rig.delimiter = ";";
+  rig.encoding = "windows-1252";
+  std::string asked;
+  const auto reading = readMade(text, {}, [&](std::string_view signature) {
+    asked = signature;
+    return std::optional(rig);
+  });
+  EXPECT_EQ(asked, plain);
+  EXPECT_EQ(reading.value().source.signature, plain);
+  EXPECT_EQ(reading.value().source.encoding, "windows-1252");
+}
+
 TEST(ReadRun, VoltsNeedAScaleFromTheProfile) {
   const std::string text = madeRun({.head = "Time (s),Travel (mm),Load (V)\n"});
   const auto open = readMade(text);

@@ -118,6 +118,24 @@ TEST(Documents, ATemperatureWindowHasTwoEndsInOrder) {
   EXPECT_EQ(code("[\"15\", 35]"), "document-not-a-number");
 }
 
+TEST(Documents, AJobKeepsWhatWasSaidOfEachRunFile) {
+  JobRun run;
+  run.file = "run.csv";
+  run.rig = "bench 1";
+  run.answers.zeroState = ZeroState::DamperFitted;
+  Job job;
+  job.items = {{"front left", {}, {{Phase::AsFound, {}, {run, run, run}}}}};
+  ReadOptions& answers = job.items[0].phases[0].runs[1].answers;
+  answers.delimiter = ";";
+  answers.headerRow = 7;
+  answers.force = "3";
+  answers.displacementUnit = "in";
+  answers.sampleRate = 512.5;
+  answers.forcePositive = Direction::Rebound;
+  job.items[0].phases[0].runs[2].answers = {};
+  EXPECT_EQ(valueOf(readJob(writeJob(job), "again")), job);
+}
+
 TEST(Documents, JobExampleComesBackEqual) {
   const Job job = valueOf(readJob(example("job.json"), "job.json"));
   EXPECT_EQ(job.kind, VehicleKind::Car);

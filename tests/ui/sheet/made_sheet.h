@@ -38,7 +38,9 @@ inline JobItem item(const std::string& corner, const std::string& serial) {
   item.damper.kind = "monotube";
   JobPhase phase;
   const std::string file = serial + " as found.csv";
-  phase.runs.push_back({file, sha256Hex(runBytes(file)), "bench 1", ZeroState::NoSpecimen, {}});
+  JobRun run{file, sha256Hex(runBytes(file)), "bench 1", {}, {}};
+  run.answers.zeroState = ZeroState::NoSpecimen;
+  phase.runs.push_back(std::move(run));
   item.phases.push_back(phase);
   return item;
 }
