@@ -70,7 +70,9 @@ const Rooms mayInclude = [] {
   ui.insert("ui/session");
   rooms["ui/plots"] = ui;
   ui.insert("ui/plots");
-  for (const char* room : {"ui/start", "ui/corners", "ui/verdict", "ui/sheet"}) rooms[room] = ui;
+  for (const char* room :
+       {"ui/start", "ui/corners", "ui/verdict", "ui/columns", "ui/rig_folder", "ui/sheet"})
+    rooms[room] = ui;
   std::set<std::string> all = ui;
   for (const auto& [room, allowed] : rooms) all.insert(room);
   rooms["ui/main_window"] = all;

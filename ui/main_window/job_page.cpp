@@ -43,12 +43,20 @@ void JobPage::connectParts() {
   connect(verdict_, &VerdictPanel::directionSettled, this, [this](Direction direction) {
     session_.settleDirection(session_.selected(), direction);
   });
+  connect(verdict_, &VerdictPanel::mendWanted, this, &JobPage::mend);
   connect(loops_->run(), &RunPlot::strikeOutWanted, this, [this](int run, const TimeSpan& span) {
     session_.strikeOut(session_.selected(), run, span);
   });
   connect(loops_->run(), &RunPlot::putBackWanted, this, [this](int run, const TimeSpan& span) {
     session_.putBack(session_.selected(), run, span);
   });
+}
+
+void JobPage::mend(NoticeAction action, int run) {
+  const RunPlace place{session_.selected(), run};
+  if (action == NoticeAction::TurnForceSign) session_.turnForceSign(place);
+  if (action == NoticeAction::ConfirmUnits) session_.confirmUnits(place);
+  if (action == NoticeAction::Columns) emit columnsWanted(place);
 }
 
 void JobPage::followSession() {

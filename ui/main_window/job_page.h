@@ -9,6 +9,7 @@ namespace dampwright {
 class CornerPanel;
 class LoopsView;
 class VerdictPanel;
+enum class NoticeAction;
 
 /// The open job: corners left, loops in the middle, verdict right. Shows what the session says and
 /// hands edits to it; what needs a dialog it asks the window for.
@@ -26,9 +27,11 @@ class JobPage : public QWidget {
   void damperWanted(const QString& corner);
   void limitsFileWanted();
   void sheetWanted();
+  void columnsWanted(const dampwright::RunPlace& place);
 
  private:
   void connectParts();
+  void mend(NoticeAction action, int run);
   void followSession();
   void refreshSides();
   void refreshCorners();

@@ -19,13 +19,16 @@
 #include "ui/main_window/about.h"
 #include "ui/main_window/actions.h"
 #include "ui/main_window/choose_files.h"
+#include "ui/main_window/columns_desk.h"
 #include "ui/main_window/job_page.h"
+#include "ui/main_window/rig_offers.h"
 #include "ui/main_window/session_sheet.h"
 #include "ui/main_window/theme.h"
 #include "ui/main_window/top_bar.h"
 #include "ui/plots/loop_plot.h"
 #include "ui/plots/loops_view.h"
 #include "ui/plots/run_plot.h"
+#include "ui/rig_folder/offer_bar.h"
 #include "ui/sheet/sheet_preview.h"
 #include "ui/start/job_dialog.h"
 #include "ui/start/safety_dialog.h"
@@ -53,7 +56,10 @@ MainWindow::MainWindow(Session& session, QWidget* parent)
       promise_(new QLabel(this)),
       pages_(new QStackedWidget),
       startPage_(new StartPage),
-      jobPage_(new JobPage(session)) {
+      jobPage_(new JobPage(session)),
+      columns_(new ColumnsDesk(session, this)),
+      offers_(new RigOffers(
+          session, [this](const QStringList& files) { takeFiles(files, {}); }, this)) {
   build();
   connectActions();
   connectEditActions();
@@ -81,6 +87,7 @@ void MainWindow::build() {
   column->setSpacing(0);
   column->addWidget(top_);
   column->addWidget(trouble_);
+  column->addWidget(offers_->bar());
   column->addWidget(pages_, 1);
   setCentralWidget(middle);
   setAcceptDrops(true);
@@ -104,6 +111,7 @@ void MainWindow::connectActions() {
   on(ActionId::StartPage, [this] { showStartPage(); });
   on(ActionId::Demonstration, [this] { session_.openDemonstration(); });
   on(ActionId::AddRuns, [this] { takeFiles(chooseRunFiles(this), {}); });
+  on(ActionId::RigFolder, [this] { offers_->choose(this); });
   onJobPage(ActionId::Limits, [this] { jobPage_->verdict()->openLimits(); });
   on(ActionId::PrintSheet, [this] { showSheet(); });
   on(ActionId::Quit, [this] { close(); });
@@ -131,6 +139,8 @@ void MainWindow::connectEditActions() {
   on(ActionId::Redo, [undo] { undo->redo(); });
   on(ActionId::JobDetails, [this] { editJob(); });
   on(ActionId::Damper, [this] { editDamper(session_.selected().corner); });
+  on(ActionId::Columns, [this] { columns_->openSelected(); });
+  connect(jobPage_, &JobPage::columnsWanted, columns_, &ColumnsDesk::open);
   on(ActionId::StrikeOut, [this] { jobPage_->loops()->run()->switchChosenCycle(); });
   connect(undo, &QUndoStack::indexChanged, this, &MainWindow::refresh);
   connect(jobPage_->loops()->run(), &RunPlot::chosenCycleChanged, this, &MainWindow::refresh);
@@ -172,6 +182,7 @@ void MainWindow::refresh() {
     does[id]->setEnabled(hasJob);
   does[ActionId::Limits]->setEnabled(hasJob);
   does[ActionId::Damper]->setEnabled(hasJob && !session_.selected().corner.isEmpty());
+  does[ActionId::Columns]->setEnabled(columns_->canOpenSelected());
   does[ActionId::PrintSheet]->setEnabled(hasJob && isPrintable(session_.job()));
   does[ActionId::Undo]->setEnabled(session_.undoStack()->canUndo());
   does[ActionId::Redo]->setEnabled(session_.undoStack()->canRedo());

@@ -12,7 +12,9 @@ namespace dampwright {
 
 class Actions;
 enum class ActionId;
+class ColumnsDesk;
 class JobPage;
+class RigOffers;
 class StartPage;
 class TopBar;
 
@@ -27,6 +29,8 @@ class MainWindow : public QMainWindow {
   const Actions& actions() const { return *actions_; }
   JobPage* jobPage() const { return jobPage_; }
   StartPage* startPage() const { return startPage_; }
+  const ColumnsDesk& columns() const { return *columns_; }
+  RigOffers& rigOffers() const { return *offers_; }
   void openFiles(const QStringList& files);  ///< as if dropped on the window
   /// The cautions, unless somebody here has read them before.
   void showSafetyOnce();
@@ -60,6 +64,8 @@ class MainWindow : public QMainWindow {
   QStackedWidget* pages_;
   StartPage* startPage_;
   JobPage* jobPage_;
+  ColumnsDesk* columns_;
+  RigOffers* offers_;
 };
 
 }  // namespace dampwright

@@ -98,6 +98,25 @@ Job withPutBack(Job job, std::string_view corner, int phase, int run, const Time
   return job;
 }
 
+const JobRun* findRun(const Job& job, std::string_view corner, int phase, int run) {
+  const JobPhase* found = findPhase(job, corner, phase);
+  if (found == nullptr || run < 0 || run >= std::ssize(found->runs)) return nullptr;
+  return &found->runs[static_cast<std::size_t>(run)];
+}
+
+Job withReading(Job job,
+                std::string_view corner,
+                int phase,
+                int run,
+                const ReadOptions& answers,
+                const std::optional<std::string>& rig) {
+  JobRun* found = runOf(job, corner, phase, run);
+  if (found == nullptr) return job;
+  found->answers = answers;
+  if (rig) found->rig = *rig;
+  return job;
+}
+
 Job withRuns(Job job, std::string_view corner, const JobPhase& runs) {
   JobItem* item = itemOf(job, corner);
   if (item == nullptr || runs.runs.empty()) return job;

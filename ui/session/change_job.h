@@ -1,5 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
+#include <optional>
 #include <string>
 #include <string_view>
 
@@ -27,6 +28,14 @@ Job withDetails(Job job, const Job& details);
 
 Job withDamper(Job job, std::string_view corner, DamperCard card);
 Job withStruckOut(Job job, std::string_view corner, int phase, int run, const TimeSpan& span);
+/// The run read by these answers and, where `rig` is given, by the profile of that name.
+Job withReading(Job job,
+                std::string_view corner,
+                int phase,
+                int run,
+                const ReadOptions& answers,
+                const std::optional<std::string>& rig);
+const JobRun* findRun(const Job& job, std::string_view corner, int phase, int run);
 Job withPutBack(Job job, std::string_view corner, int phase, int run, const TimeSpan& span);
 
 /// Runs added to the corner's phase of this state and setting, which is made where there is none.

@@ -25,7 +25,7 @@ struct DropProblem {
 /// A run file as it was dropped and read.
 struct DroppedRun {
   RunBytes bytes;
-  std::shared_ptr<const RunReading> reading;  ///< always with a trace
+  std::shared_ptr<const RunReading> reading;  ///< without a trace where it asks something first
   std::string rig;                            ///< name of the profile that it was read by
   std::optional<DamperCard> knownCard;  ///< the book's newest card of the serial that it tells
 };

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
+#include <algorithm>
 #include <optional>
+#include <string>
 #include <string_view>
 #include <vector>
 
@@ -15,6 +17,15 @@ inline std::optional<RigProfile> findProfile(const std::vector<RigProfile>& prof
     if (!signature.empty() && profile.signature == signature) return profile;
   }
   return std::nullopt;
+}
+
+/// The profile that a run was given by name, else the one of its file's signature.
+inline std::optional<RigProfile> findProfile(const std::vector<RigProfile>& profiles,
+                                             std::string_view name,
+                                             std::string_view signature) {
+  const auto named = std::ranges::find(profiles, name, &RigProfile::name);
+  if (!name.empty() && named != profiles.end()) return *named;
+  return findProfile(profiles, signature);
 }
 
 }  // namespace dampwright

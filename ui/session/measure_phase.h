@@ -20,8 +20,8 @@ namespace dampwright {
 struct RunInHand {
   std::shared_ptr<const std::string> bytes;
   std::shared_ptr<const RunReading> reading;
-  ReadOptions answers;  ///< by which `reading` was made
-  std::string rig;      ///< by whose profile
+  ReadOptions answers = {};  ///< by which `reading` was made
+  std::string rig = {};      ///< by whose profile
 };
 
 /// Everything that a measurement depends on, as a snapshot.

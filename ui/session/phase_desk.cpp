@@ -92,7 +92,13 @@ void PhaseDesk::refresh(Entry& entry, const std::optional<Limits>& limits) {
 
 void PhaseDesk::measure(Entry& entry) {
   PhaseTask task{entry.runs, {}, entry.card, profiles_, entry.limits, bookFile_};
-  for (const JobRun& run : entry.runs) task.inHand.push_back(runs_[run.sha256]);
+  for (const JobRun& run : entry.runs) {
+    RunInHand& inHand = runs_[run.sha256];
+    if (inHand.answers != run.answers || inHand.rig != run.rig) {
+      inHand = {inHand.bytes, nullptr, run.answers, run.rig};
+    }
+    task.inHand.push_back(inHand);
+  }
   entry.stale = false;
   entry.state.busy = true;
   entry.state.progress = 0;
@@ -113,7 +119,9 @@ void PhaseDesk::takeHome(Entry& entry,
                          PhaseOutcome outcome,
                          const std::optional<Limits>& judgedBy) {
   for (std::size_t i = 0; i < outcome.readings.size(); ++i) {
-    runs_[entry.runs[i].sha256].reading = outcome.readings[i];
+    const JobRun& run = entry.runs[i];
+    RunInHand& inHand = runs_[run.sha256];
+    if (outcome.readings[i]) inHand = {inHand.bytes, outcome.readings[i], run.answers, run.rig};
   }
   entry.state = {false, 1, outcome.measured, std::move(outcome.verdict), outcome.problem};
   if (entry.state.measured && entry.limits != judgedBy) {
@@ -153,7 +161,9 @@ void PhaseDesk::setProfiles(std::vector<RigProfile> profiles) {
   for (auto& [sha256, run] : runs_) {
     if (!run.reading) continue;
     const std::string& signature = run.reading->source.signature;
-    if (findProfile(before, signature) == findProfile(profiles_, signature)) continue;
+    if (findProfile(before, run.rig, signature) == findProfile(profiles_, run.rig, signature)) {
+      continue;
+    }
     run.reading.reset();
     for (const auto& entry : entries_) {
       if (std::ranges::count(entry->runs, sha256, &JobRun::sha256) > 0) entry->stale = true;

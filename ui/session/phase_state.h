@@ -19,6 +19,14 @@ struct PhaseKey {
   bool operator==(const PhaseKey&) const = default;
 };
 
+/// One run file: its phase and its index there.
+struct RunPlace {
+  PhaseKey phase;
+  int run = 0;
+
+  bool operator==(const RunPlace&) const = default;
+};
+
 /// What is known of one phase. `measured` and `verdict` are the newest results; `busy` while a
 /// newer one is made.
 struct PhaseState {

@@ -11,10 +11,9 @@
 #include "core/base/sha256.h"
 #include "core/book/book.h"
 #include "core/intake/load_file.h"
+#include "core/job/read_metadata.h"
 #include "core/records/documents.h"
 #include "ui/session/find_profile.h"
-#include "ui/session/measure_phase.h"
-#include "core/job/read_metadata.h"
 
 namespace dampwright {
 
@@ -102,7 +101,6 @@ DroppedItem run(const DropTask& task,
   };
   Result<RunReading> read = readRun(bytes, nameOf(path), {}, find, progress);
   if (!read) return problem(path, read.error());
-  if (!read.value().trace) return problem(path, openPointsError(read.value(), nameOf(path)));
   DroppedRun dropped;
   dropped.knownCard = cardOf(task.bookFile, serialOf(read.value().source.metadata));
   const auto profile = findProfile(task.profiles, read.value().source.signature);

@@ -5,6 +5,8 @@
 #include <chrono>
 #include <utility>
 
+#include "ui/session/change_job.h"
+#include "ui/session/find_profile.h"
 #include "ui/text/sentences.h"
 
 namespace dampwright {
@@ -111,6 +113,41 @@ Result<std::string> Session::bytesOfRun(const std::string& sha256) const {
   const Result<Book> book = Book::open(bookFile_);
   if (!book) return book.error();
   return book.value().runFile(sha256);
+}
+
+const JobRun* Session::run(const RunPlace& place) const {
+  const std::string corner = place.phase.corner.toStdString();
+  return hasJob() ? findRun(*job_, corner, place.phase.phase, place.run) : nullptr;
+}
+
+std::shared_ptr<const RunReading> Session::reading(const RunPlace& place) const {
+  const JobRun* found = run(place);
+  return found != nullptr ? desk_.readingOf(found->sha256) : nullptr;
+}
+
+std::function<Result<std::shared_ptr<const std::string>>()> Session::loaderOf(
+    const RunPlace& place) const {
+  using Text = std::shared_ptr<const std::string>;
+  const JobRun* found = run(place);
+  expects(found != nullptr);
+  const auto inHand = desk_.bytesOf(found->sha256);
+  return [inHand, bookFile = bookFile_, sha256 = found->sha256]() -> Result<Text> {
+    if (inHand) return inHand;
+    const Result<Book> book = Book::open(bookFile);
+    if (!book) return book.error();
+    Result<std::string> bytes = book.value().runFile(sha256);
+    if (!bytes) return bytes.error();
+    return std::make_shared<const std::string>(std::move(bytes).value());
+  };
+}
+
+const std::vector<RigProfile>& Session::rigProfiles() const { return desk_.profiles(); }
+
+std::optional<RigProfile> Session::rigOf(const RunPlace& place) const {
+  const JobRun* found = run(place);
+  if (found == nullptr) return std::nullopt;
+  const auto known = reading(place);
+  return findProfile(desk_.profiles(), found->rig, known ? known->source.signature : std::string());
 }
 
 void Session::stopWork() {

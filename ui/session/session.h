@@ -4,6 +4,7 @@
 #include <QString>
 #include <QStringList>
 #include <QUndoStack>
+#include <functional>
 #include <memory>
 #include <optional>
 #include <string>
@@ -47,6 +48,16 @@ class Session : public QObject {
   /// core/book.
   Result<std::string> bytesOfRun(const std::string& sha256) const;
   QUndoStack* undoStack();
+  /// The run of the job; nothing where there is none.
+  const JobRun* run(const RunPlace& place) const;
+  /// How it was understood, also where something is still asked; nothing while it is being read.
+  std::shared_ptr<const RunReading> reading(const RunPlace& place) const;
+  /// Gets the run's bytes, from memory or from the book; for any thread. There must be the run.
+  std::function<Result<std::shared_ptr<const std::string>>()> loaderOf(const RunPlace& place) const;
+  const std::vector<RigProfile>& rigProfiles() const;  ///< last saved first
+  /// The profile by which a run is read.
+  std::optional<RigProfile> rigOf(const RunPlace& place) const;
+  QString bookFile() const { return bookFile_; }  ///< for work that opens the book on its own
 
  public slots:
   void select(const dampwright::PhaseKey& key);
@@ -70,6 +81,17 @@ class Session : public QObject {
   void settleDirection(const dampwright::PhaseKey& key, dampwright::Direction displacementPositive);
   void dismissDropProblem(int problem);  ///< index into dropProblems()
   void dismissDropProblems();
+  /// The run is read by `answers`; with `remember` its rig is that one from now on, and every run
+  /// of that rig is read again. One edit.
+  void confirmColumns(const dampwright::RunPlace& place,
+                      const dampwright::ReadOptions& answers,
+                      const std::optional<dampwright::RigProfile>& remember);
+  /// The force sign that was given turned, where it was given: with the run, or in its profile.
+  void turnForceSign(const dampwright::RunPlace& place);
+  /// Units that were assumed become those of the run's rig.
+  void confirmUnits(const dampwright::RunPlace& place);
+  /// A file of the rig folder was taken or turned down; it is not offered again.
+  void noteOffered(const QString& sha256, const QString& name);
   void stopWork();
 
  signals:
@@ -82,6 +104,8 @@ class Session : public QObject {
   void bookRead();  ///< once, after the start: limits, recent jobs and the last open job are there
   void idle();      ///< busy() has become false: a headless run may go on
   void dropProblemsChanged();
+  /// Dropped runs leave something open: the first of each file layout.
+  void questionsAsked(const std::vector<dampwright::RunPlace>& places);
   void bookTrouble(const QString& sentence);  ///< the book could not be written; what was typed is
                                               ///< kept. Empty: it is well again
 
@@ -120,7 +144,8 @@ class Session : public QObject {
   void takeDemonstration(std::vector<DroppedItem> items);
   void say(const QString& file, Error error);
   void tellTrouble(const Error& error);
-  RigProfile profileFor(const std::string& signature) const;
+  RigProfile profileFor(const std::string& name, const std::string& signature) const;
+  void askOpen(const std::vector<RunBytes>& files);
   void refreshRecentJobs();
   void noteVerdict();
   void settle();

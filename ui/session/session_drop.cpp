@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 // What comes of dropped files.
 #include <QFileInfo>
+#include <algorithm>
+#include <set>
 #include <utility>
 
 #include "ui/session/change_job.h"
@@ -109,11 +111,32 @@ void Session::takeRuns(std::vector<DroppedRun> runs, const QString& corner) {
       placeRuns(*job_, runs, corner.toStdString(), selected_.corner.toStdString());
   for (const DroppedRun& run : runs) {
     const bool taken = std::ranges::count(placed.files, run.bytes.sha256, &RunBytes::sha256) > 0;
-    if (taken) desk_.hold(run.bytes.sha256, {run.bytes.bytes, run.reading});
+    if (taken) desk_.hold(run.bytes.sha256, {run.bytes.bytes, run.reading, {}, run.rig});
   }
   dropProblems_.insert(dropProblems_.end(), placed.problems.begin(), placed.problems.end());
   edit(tr("add %n run(s)", nullptr, static_cast<int>(placed.files.size())), placed.job);
   if (placed.last) select(*placed.last);
+  askOpen(placed.files);
+}
+
+// What the first file of a layout answers need not be asked of the others.
+void Session::askOpen(const std::vector<RunBytes>& files) {
+  std::vector<RunPlace> places;
+  std::set<std::string> asked;
+  for (const JobItem& item : job_->items) {
+    for (std::size_t phase = 0; phase < item.phases.size(); ++phase) {
+      const std::vector<JobRun>& runs = item.phases[phase].runs;
+      for (std::size_t run = 0; run < runs.size(); ++run) {
+        if (std::ranges::count(files, runs[run].sha256, &RunBytes::sha256) == 0) continue;
+        const auto reading = desk_.readingOf(runs[run].sha256);
+        if (!reading || reading->open.empty()) continue;
+        if (!asked.insert(reading->source.signature).second) continue;
+        places.push_back({{QString::fromStdString(item.corner), static_cast<int>(phase)},
+                          static_cast<int>(run)});
+      }
+    }
+  }
+  if (!places.empty()) emit questionsAsked(places);
 }
 
 void Session::takeCard(const DamperCard& card, const QString& corner) {

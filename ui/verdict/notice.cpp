@@ -61,6 +61,21 @@ void Notice::addButtons(const NoticeView& view) {
       emit directionSettled(Direction::Rebound);
     });
   }
+  const auto addMend = [&](const QString& text, NoticeAction action) {
+    connect(add(text), &QPushButton::clicked, this, [this, action, run = view.run] {
+      emit mendWanted(action, run);
+    });
+  };
+  if (view.action == NoticeAction::TurnForceSign)
+    addMend(tr("Turn the force sign"), NoticeAction::TurnForceSign);
+  if (view.action == NoticeAction::ConfirmUnits) {
+    addMend(
+        view.confirmed.isEmpty() ? tr("Confirm the unit") : tr("Confirm %1").arg(view.confirmed),
+        NoticeAction::ConfirmUnits);
+    addMend(tr("Another unit…"), NoticeAction::Columns);
+  }
+  if (view.action == NoticeAction::Columns)
+    addMend(tr("Look at the columns…"), NoticeAction::Columns);
   if (view.action == NoticeAction::Dismiss) {
     connect(add(tr("Dismiss")), &QPushButton::clicked, this, [this, index = view.index] {
       emit dismissed(index);

@@ -15,6 +15,7 @@ class Notice : public QFrame {
 
  signals:
   void directionSettled(dampwright::Direction displacementPositive);
+  void mendWanted(dampwright::NoticeAction action, int run);
   void dismissed(int problem);
 
  private:

@@ -32,6 +32,7 @@ void NoticeList::setNotices(const std::vector<NoticeView>& notices) {
   for (const NoticeView& view : notices) {
     auto* notice = new Notice(view);
     connect(notice, &Notice::directionSettled, this, &NoticeList::directionSettled);
+    connect(notice, &Notice::mendWanted, this, &NoticeList::mendWanted);
     connect(notice, &Notice::dismissed, this, &NoticeList::dismissed);
     column_->insertWidget(column_->count() - 1, notice);
   }

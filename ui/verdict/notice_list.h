@@ -22,6 +22,7 @@ class NoticeList : public QScrollArea {
 
  signals:
   void directionSettled(dampwright::Direction displacementPositive);
+  void mendWanted(dampwright::NoticeAction action, int run);
   void dismissed(int problem);
 
  private:

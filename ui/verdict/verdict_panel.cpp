@@ -75,6 +75,7 @@ VerdictPanel::VerdictPanel(QWidget* parent)
   connect(notices_, &NoticeList::directionSettled, this, &VerdictPanel::directionSettled);
   connect(notices_, &NoticeList::dismissed, this, &VerdictPanel::dismissed);
   connect(dismissAll_, &QPushButton::clicked, this, &VerdictPanel::allDismissed);
+  connect(notices_, &NoticeList::mendWanted, this, &VerdictPanel::mendWanted);
 }
 
 void VerdictPanel::buildColumn() {

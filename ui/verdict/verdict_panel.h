@@ -33,6 +33,7 @@ class VerdictPanel : public QFrame {
   void directionSettled(dampwright::Direction displacementPositive);
   void dismissed(int problem);  ///< index of a drop problem
   void allDismissed();
+  void mendWanted(dampwright::NoticeAction action, int run);
   void sheetWanted();
 
  protected:

@@ -3,9 +3,11 @@
 
 #include <QCoreApplication>
 #include <algorithm>
+#include <map>
 
 #include "ui/text/check_text.h"
 #include "ui/text/names.h"
+#include "ui/text/questions.h"
 #include "ui/text/sentences.h"
 
 namespace dampwright {
@@ -16,17 +18,41 @@ struct Panel {
   Q_DECLARE_TR_FUNCTIONS(VerdictPanel)
 };
 
+// What one choice of the technician mends; a load cell that was too small stays too small.
 NoticeAction actionFor(const std::string& code) {
-  return code == "direction-assumed" ? NoticeAction::SettleDirection : NoticeAction::None;
+  static const std::map<std::string, NoticeAction> actions = {
+      {"direction-assumed", NoticeAction::SettleDirection},
+      {"force-sign-reversed", NoticeAction::TurnForceSign},
+      {"unit-assumed", NoticeAction::ConfirmUnits},
+      {"velocity-disagrees", NoticeAction::Columns},
+      {"uneven-clock", NoticeAction::Columns},
+      {"clock-restarts", NoticeAction::Columns},
+      {"bad-stamps", NoticeAction::Columns},
+      {"repeated-stamps", NoticeAction::Columns},
+      {"unreadable-cells", NoticeAction::Columns},
+      {"thousands-marks", NoticeAction::Columns},
+      {"rig-column-missing", NoticeAction::Columns}};
+  const auto found = actions.find(code);
+  return found == actions.end() ? NoticeAction::None : found->second;
 }
 
-NoticeView noticeOf(const Remark& remark, const QString& title) {
+QString unitIn(const Remark& remark) {
+  for (const NamedValue& value : remark.values) {
+    const auto* words = std::get_if<std::string>(&value.value);
+    if (value.name == "unit" && words != nullptr) return QString::fromStdString(*words);
+  }
+  return {};
+}
+
+NoticeView noticeOf(const Remark& remark, const QString& title, int run) {
   return {title,
           sentenceText(remark),
           hintText(remark),
           remark.severity == Severity::Warning,
           actionFor(remark.code),
-          0};
+          0,
+          run,
+          unitIn(remark)};
 }
 
 // The same remark may stand with the run and with the measurement: it is shown once.
@@ -77,15 +103,48 @@ void addReasons(VerdictView& view) {
 
 void addRemarks(VerdictView& view, const Measurement& measurement) {
   for (const Severity severity : {Severity::Warning, Severity::Note}) {
-    for (const MeasuredRun& run : measurement.runs) {
+    for (std::size_t i = 0; i < measurement.runs.size(); ++i) {
+      const MeasuredRun& run = measurement.runs[i];
       const QString file = QString::fromStdString(run.source.file.name);
       for (const Remark& remark : run.remarks) {
-        if (remark.severity == severity) add(view.notices, noticeOf(remark, file));
+        if (remark.severity == severity)
+          add(view.notices, noticeOf(remark, file, static_cast<int>(i)));
       }
     }
     for (const Remark& remark : measurement.remarks) {
-      if (remark.severity == severity) add(view.notices, noticeOf(remark, {}));
+      if (remark.severity == severity) add(view.notices, noticeOf(remark, {}, 0));
     }
+  }
+}
+
+// A run that asks first keeps its phase from being measured; so does one that can't be read as its
+// profile or its answers say, which the columns window may mend too.
+void addQuestions(VerdictView& view, const Session& session) {
+  const PhaseKey key = session.selected();
+  const PhaseState& state = session.state(key);
+  if (!state.problem) return;
+  if (state.problem->code != "open-points") {
+    const std::string& file = state.problem->place.file;
+    int at = -1;
+    for (int i = 0; session.run({key, i}) != nullptr; ++i) {
+      if (session.run({key, i})->file == file) at = i;
+    }
+    const NoticeAction action = at < 0 ? NoticeAction::None : NoticeAction::Columns;
+    add(view.notices, {{}, sentenceText(*state.problem), {}, true, action, 0, std::max(at, 0), {}});
+    return;
+  }
+  for (int i = 0; session.run({key, i}) != nullptr; ++i) {
+    const auto reading = session.reading({key, i});
+    if (!reading || reading->trace) continue;
+    add(view.notices,
+        {QString::fromStdString(session.run({key, i})->file),
+         questionsText(*reading),
+         {},
+         true,
+         NoticeAction::Columns,
+         0,
+         i,
+         {}});
   }
 }
 
@@ -116,8 +175,7 @@ VerdictView verdictView(const Session& session) {
   view.broken = state.problem.has_value();
   view.printable = isPrintable(session.job());
   view.verdict = state.verdict;
-  if (state.problem)
-    add(view.notices, {{}, sentenceText(*state.problem), {}, true, NoticeAction::None, 0});
+  addQuestions(view, session);
   addReasons(view);
   if (state.measured) addRemarks(view, state.measured->measurement);
   return view;

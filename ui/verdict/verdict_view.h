@@ -13,6 +13,9 @@ namespace dampwright {
 enum class NoticeAction {
   None,
   SettleDirection,  ///< two answers: rising displacement is compression, or rebound
+  TurnForceSign,    ///< the sign that was given is turned where it was given
+  ConfirmUnits,     ///< the units that were assumed are right; else the columns window
+  Columns,          ///< answered in the columns window
   Dismiss           ///< a file that was dropped: read and put away
 };
 
@@ -22,7 +25,9 @@ struct NoticeView {
   QString hint;   ///< what to do; may be empty
   bool warning = false;
   NoticeAction action = NoticeAction::None;
-  int index = 0;  ///< of a drop problem
+  int index = 0;           ///< of a drop problem
+  int run = 0;             ///< index into the phase's runs
+  QString confirmed = {};  ///< what ConfirmUnits confirms: "mm"
 
   bool operator==(const NoticeView&) const = default;
 };

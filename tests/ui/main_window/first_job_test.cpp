@@ -64,6 +64,7 @@ TEST_F(FirstJobTest, WhatWasDroppedIsThereAfterARestart) {
 
 TEST_F(FirstJobTest, ADropIsUndoneAndDoneAgain) {
   startCar();
+  dropOn(window.get(), {made::sample("rig_bench_1.json")});
   dropOn(place("front left"), {made::sample("car_front_left.csv")});
   ASSERT_FALSE(spoken("front left").contains("no run")) << spoken("front left").toStdString();
   QTest::keyClick(window.get(), Qt::Key_Z, Qt::ControlModifier);
@@ -76,6 +77,7 @@ TEST_F(FirstJobTest, ADropIsUndoneAndDoneAgain) {
 
 TEST_F(FirstJobTest, ACycleIsStruckOutAndPutBack) {
   startCar();
+  dropOn(window.get(), {made::sample("rig_bench_1.json")});
   dropOn(place("front left"), {made::sample("car_front_left.csv")});
   RunPlot* run = window->jobPage()->loops()->run();
   ASSERT_FALSE(run->figure().cycles.empty());
@@ -92,6 +94,7 @@ TEST_F(FirstJobTest, ACycleIsStruckOutAndPutBack) {
 
 TEST_F(FirstJobTest, AWrongFileSaysWhyInPlaceAndNothingIsLost) {
   startCar();
+  dropOn(window.get(), {made::sample("rig_bench_1.json")});
   dropOn(place("front left"), {made::sample("car_front_left.csv")});
   QFile picture(folder.filePath("holiday.png"));
   ASSERT_TRUE(picture.open(QIODevice::WriteOnly));

@@ -116,6 +116,29 @@ TEST_F(VerdictPanelTest, AnAssumedDirectionIsSettledByOneOfTwoButtons) {
   EXPECT_EQ(settled[0][0].value<Direction>(), Direction::Rebound);
 }
 
+TEST_F(VerdictPanelTest, EachRemarkThatAChoiceMendsHasItsButton) {
+  const auto notice = [](NoticeAction action, int run) {
+    return NoticeView{"run.csv", "Something is so.", {}, true, action, 0, run, "mm"};
+  };
+  view.notices = {notice(NoticeAction::TurnForceSign, 0),
+                  notice(NoticeAction::ConfirmUnits, 1),
+                  notice(NoticeAction::Columns, 2)};
+  panel.setView(view);
+  QSignalSpy mend(&panel, &VerdictPanel::mendWanted);
+  for (const char* text :
+       {"Turn the force sign", "Confirm mm", "Another unit…", "Look at the columns…"}) {
+    ASSERT_NE(button(QString::fromUtf8(text)), nullptr) << text;
+    QTest::mouseClick(button(QString::fromUtf8(text)), Qt::LeftButton);
+  }
+  ASSERT_EQ(mend.count(), 4);
+  EXPECT_EQ(mend[0][0].value<NoticeAction>(), NoticeAction::TurnForceSign);
+  EXPECT_EQ(mend[1][0].value<NoticeAction>(), NoticeAction::ConfirmUnits);
+  EXPECT_EQ(mend[1][1].toInt(), 1);
+  EXPECT_EQ(mend[2][0].value<NoticeAction>(), NoticeAction::Columns);
+  EXPECT_EQ(mend[3][1].toInt(), 2);
+  EXPECT_EQ(made::clippedTexts(&panel), QStringList());
+}
+
 TEST_F(VerdictPanelTest, AWrongFileSaysWhyInPlaceAndIsPutAway) {
   view.notices = {{"holiday.jpg",
                    "This is a picture, not a run file.",
