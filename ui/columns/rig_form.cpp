@@ -15,6 +15,8 @@ namespace dampwright {
 
 namespace {
 
+constexpr int longestUnit = 6;  // letters
+
 QString labelOf(const RigField& field) { return RigForm::tr(field.label); }
 
 }  // namespace
@@ -50,13 +52,18 @@ RigForm::RigForm(QWidget* parent) : QWidget(parent) {
 
 void RigForm::addField(QFormLayout& form, const RigField& field) {
   auto* edit = new QLineEdit;
-  edit->setFixedWidth(96);
+  edit->setFixedWidth(112);
   edit->setAccessibleName(tr("%1, %2").arg(labelOf(field), QString::fromUtf8(field.unit)));
   auto* row = new QHBoxLayout;
-  auto* unit = new QLabel(QString::fromUtf8(field.unit));
-  unit->setObjectName(QStringLiteral("quiet"));
+  const QString unit = QString::fromUtf8(field.unit);
   row->addWidget(edit);
-  row->addWidget(unit);
+  if (unit.size() > longestUnit) {  // the form of a date stands where it is typed
+    edit->setPlaceholderText(unit);
+  } else {
+    auto* after = new QLabel(unit);
+    after->setObjectName(QStringLiteral("quiet"));
+    row->addWidget(after);
+  }
   row->addStretch();
   auto* label = new QLabel(labelOf(field));
   label->setBuddy(edit);

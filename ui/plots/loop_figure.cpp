@@ -177,8 +177,7 @@ QString figureYTitle() {
 QString figureEmptyText(FigureKind kind) {
   return kind == FigureKind::ForceVelocity
              ? Plots::tr("Force against velocity stands here\nonce a run is read.")
-             : Plots::tr(
-                   "Force against displacement stands here\nonce a run is read.");
+             : Plots::tr("Force against displacement stands here\nonce a run is read.");
 }
 
 QString figureSummary(const LoopFigure& figure) {

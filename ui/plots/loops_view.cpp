@@ -6,6 +6,7 @@
 #include <QHBoxLayout>
 #include <QVBoxLayout>
 
+#include "ui/look/elided.h"
 #include "ui/look/type.h"
 #include "ui/plots/loop_plot.h"
 #include "ui/plots/run_plot.h"
@@ -17,9 +18,9 @@ LoopsView::LoopsView(QWidget* parent)
       forceVelocity_(new LoopPlot(FigureKind::ForceVelocity)),
       forceDisplacement_(new LoopPlot(FigureKind::ForceDisplacement)),
       run_(new RunPlot),
-      velocityReadout_(new QLabel),
-      displacementReadout_(new QLabel),
-      runReadout_(new QLabel) {
+      velocityReadout_(new ElidedLabel),
+      displacementReadout_(new ElidedLabel),
+      runReadout_(new ElidedLabel) {
   auto* grid = new QGridLayout(this);
   grid->setContentsMargins(0, 0, 0, 0);
   grid->setSpacing(12);
@@ -42,12 +43,13 @@ LoopsView::LoopsView(QWidget* parent)
       forceVelocity_, &LoopPlot::forceRangeChanged, forceDisplacement_, &LoopPlot::showForceRange);
   connect(
       forceDisplacement_, &LoopPlot::forceRangeChanged, forceVelocity_, &LoopPlot::showForceRange);
-  connect(forceVelocity_, &LoopPlot::readoutChanged, velocityReadout_, &QLabel::setText);
-  connect(forceDisplacement_, &LoopPlot::readoutChanged, displacementReadout_, &QLabel::setText);
-  connect(run_, &RunPlot::readoutChanged, runReadout_, &QLabel::setText);
+  connect(forceVelocity_, &LoopPlot::readoutChanged, velocityReadout_, &ElidedLabel::setWhole);
+  connect(
+      forceDisplacement_, &LoopPlot::readoutChanged, displacementReadout_, &ElidedLabel::setWhole);
+  connect(run_, &RunPlot::readoutChanged, runReadout_, &ElidedLabel::setWhole);
 }
 
-QWidget* LoopsView::card(const QString& title, QWidget* plot, QLabel* readout) {
+QWidget* LoopsView::card(const QString& title, QWidget* plot, ElidedLabel* readout) {
   auto* frame = new QFrame;
   frame->setObjectName(QStringLiteral("card"));
   auto* heading = new QLabel(title);

@@ -1,12 +1,12 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
-#include <QLabel>
 #include <QWidget>
 #include <memory>
 #include <optional>
 
 #include "core/measure/measure_runs.h"
 #include "core/verdict/verdict.h"
+#include "ui/look/elided.h"
 #include "ui/plots/instant.h"
 
 namespace dampwright {
@@ -34,12 +34,12 @@ class LoopsView : public QWidget {
   void fit();
 
  private:
-  QWidget* card(const QString& title, QWidget* plot, QLabel* readout);
+  QWidget* card(const QString& title, QWidget* plot, ElidedLabel* readout);
 
   LoopPlot* forceVelocity_;
   LoopPlot* forceDisplacement_;
   RunPlot* run_;
-  QLabel *velocityReadout_, *displacementReadout_, *runReadout_;
+  ElidedLabel *velocityReadout_, *displacementReadout_, *runReadout_;
 };
 
 }  // namespace dampwright

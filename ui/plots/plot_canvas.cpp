@@ -150,7 +150,8 @@ void PlotCanvas::paintEvent(QPaintEvent* event) {
   if (!emptyText_.isEmpty()) {
     painter.setPen(colours_.quiet);
     painter.setFont(screenFont(TextSize::Text));
-    painter.drawText(rect().adjusted(16, 0, -16, 0), Qt::AlignCenter | Qt::TextWordWrap, emptyText_);
+    painter.drawText(
+        rect().adjusted(16, 0, -16, 0), Qt::AlignCenter | Qt::TextWordWrap, emptyText_);
   }
   if (hasFocus()) {
     painter.setPen(QPen(colours_.action, 2));

@@ -3,8 +3,8 @@
 
 #include <gmock/gmock.h>
 
-#include "ui/session/change_job.h"
 #include "core/job/suggest_corner.h"
+#include "ui/session/change_job.h"
 
 namespace dampwright {
 namespace {
