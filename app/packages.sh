@@ -3,7 +3,7 @@
 
 packages_program="g++ cmake ninja-build qt6-base-dev libqcustomplot-dev libqt6sql6-sqlite libeigen3-dev
   nlohmann-json3-dev libssl-dev libboost-dev libcli11-dev fonts-dejavu-core"
-packages_tests="libgtest-dev libgmock-dev python3 python3-scipy poppler-utils"
+packages_tests="libgtest-dev libgmock-dev python3 python3-scipy python3-pandas poppler-utils"
 packages_ci="clang-16 clang-tidy-16 clang-format-16"
 
 # install_packages NAME...: installs those that are missing, as root or through sudo; says nothing when none is.
