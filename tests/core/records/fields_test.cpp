@@ -101,7 +101,7 @@ TEST(Fields, AnErrorNeverPrintsMoreThanItsLineCanHold) {
   const std::string line =
       problem(", \"length_mm\": \"" + std::string(59, 'a') + "ä" + std::string(100000, 'b') + "\"");
   EXPECT_LT(line.size(), 300u);
-  EXPECT_NE(line.find(std::string(59, 'a') + "…"), std::string::npos) << line;
+  EXPECT_NE(line.find(std::string(59, 'a').append("…")), std::string::npos) << line;
 }
 
 TEST(Fields, ADocumentOfAnotherKindOrANewerVersionIsRefusedBeforeItsKeys) {
