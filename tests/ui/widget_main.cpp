@@ -4,7 +4,9 @@
 
 #include <QApplication>
 #include <QLocale>
+#include <QSettings>
 #include <QStandardPaths>
+#include <QTemporaryDir>
 
 #include "ui/look/palette.h"
 #include "ui/look/style_sheet.h"
@@ -13,6 +15,8 @@
 int main(int count, char** arguments) {
   qputenv("QT_QPA_PLATFORM", "offscreen");
   QStandardPaths::setTestModeEnabled(true);
+  const QTemporaryDir settings;  // of this process alone: tests run side by side
+  QSettings::setPath(QSettings::NativeFormat, QSettings::UserScope, settings.path());
   QLocale::setDefault(QLocale::c());
   QApplication application(count, arguments);
   QApplication::setStyle(QStringLiteral("Fusion"));
