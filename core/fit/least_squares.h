@@ -56,8 +56,8 @@ struct FitSummary {
 /// Finds a local minimum: where there are several, the start decides.
 ///
 /// Accuracy: parameters to better than 6 digits on the NIST StRD sets of tests/reference/nist.
-/// Source: J. J. Moré, The Levenberg-Marquardt algorithm, Lecture Notes in Mathematics 630 (1978)
-/// 105, for the scaling; H. B. Nielsen, IMM-REP-1999-05, for the damping; D. M. Bates, D. G. Watts,
+/// Source: J. J. Moré, The Levenberg-Marquardt algorithm, LNM 630 (Springer 1978) 105,
+/// for the scaling; H. B. Nielsen, IMM-REP-1999-05, for the damping; D. M. Bates, D. G. Watts,
 /// Technometrics 23 (1981) 179, for the convergence criterion.
 FitSummary fitLeastSquares(const LeastSquaresProblem& problem,
                            const Eigen::VectorXd& start,

@@ -17,7 +17,8 @@ namespace dampwright {
 namespace fs = std::filesystem;
 
 Folder::Folder() {
-  std::string name = (fs::temp_directory_path() / "dampwright-batch-XXXXXX").string();
+  std::string name = (fs::temp_directory_path() / "dampwright-batch-").string();
+  name.append(6, 'X');  // what mkdtemp fills in
   path_ = ::mkdtemp(name.data());
 }
 
